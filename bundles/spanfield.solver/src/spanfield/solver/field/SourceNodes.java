@@ -1,0 +1,90 @@
+/* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
+package spanfield.solver.field;
+
+import spanfield.solver.geometry.CatenarySpan;
+
+/**
+ * Quadrature nodes on wires: position and weighted path element of each, as arrays that grow. A worker's scratch, not shared.
+ *
+ * <p>Nodes of a panel come from one hyperbolic pair at the panel's middle and short series about it (addition theorem), not from a cosh
+ * for each node.
+ */
+final class SourceNodes {
+
+    /** Largest |u| for which the series of sinh u and cosh u - 1 below are exact to double precision: next term 0.5^15/15! = 2e-17. */
+    private static final double SERIES_REACH = 0.5;
+
+    double[] x = new double[64];
+    double[] y = new double[64];
+    double[] z = new double[64];
+    double[] dx = new double[64];
+    double[] dy = new double[64];
+    double[] dz = new double[64];
+    int count;
+    /** Least semi-minor axis of the ellipses about the panels: a lower estimate of the distance from the wire to the nearest point. */
+    double nearest;
+
+    void clear() {
+        count = 0;
+        nearest = Double.POSITIVE_INFINITY;
+    }
+
+    /**
+     * Adds the nodes of the Gauss rule with {@code n} nodes on the part of a span between the horizontal distances from and to.
+     */
+    void add(CatenarySpan span, SpanVectors v, double from, double to, int n) {
+        reserve(n);
+        double half = (to - from) / 2;
+        double middle = (to + from) / 2;
+        double c = span.constantMetres();
+        boolean straight = Double.isInfinite(c);
+        double theta = straight ? 0 : (middle - span.vertexMetres()) / c;
+        double sinh = straight ? 0 : Math.sinh(theta);
+        double cosh = straight ? 1 : Math.sqrt(1 + sinh * sinh);
+        double depth = span.depthMetres(middle);
+        boolean series = straight || half / c <= SERIES_REACH;
+        for (int i = 0; i < n; i++) {
+            double step = half * GaussRules.node(n, i);
+            double weight = half * GaussRules.weight(n, i);
+            double d = depth;
+            double slope = 0;
+            if (!straight) {
+                double u = step / c;
+                double sinhU = series ? sinh(u) : Math.sinh(u);
+                double coshU1 = series ? coshLess1(u) : Math.cosh(u) - 1;
+                d = depth + v.tz * step - c * (cosh * coshU1 + sinh * sinhU);
+                slope = v.tz - (sinh + sinh * coshU1 + cosh * sinhU);
+            }
+            double s = middle + step;
+            x[count] = v.x0 + s * v.tx + d * v.ex;
+            y[count] = v.y0 + s * v.ty + d * v.ey;
+            z[count] = v.z0 + s * v.tz + d * v.ez;
+            dx[count] = weight * (v.tx + slope * v.ex);
+            dy[count] = weight * (v.ty + slope * v.ey);
+            dz[count] = weight * (v.tz + slope * v.ez);
+            count++;
+        }
+    }
+
+    private static double sinh(double u) {
+        double q = u * u;
+        return u * (1 + q / 6 * (1 + q / 20 * (1 + q / 42 * (1 + q / 72 * (1 + q / 110 * (1 + q / 156))))));
+    }
+
+    private static double coshLess1(double u) {
+        double q = u * u;
+        return q / 2 * (1 + q / 12 * (1 + q / 30 * (1 + q / 56 * (1 + q / 90 * (1 + q / 132 * (1 + q / 182))))));
+    }
+
+    private void reserve(int n) {
+        if (count + n > x.length) {
+            int size = Math.max(2 * x.length, count + n);
+            x = java.util.Arrays.copyOf(x, size);
+            y = java.util.Arrays.copyOf(y, size);
+            z = java.util.Arrays.copyOf(z, size);
+            dx = java.util.Arrays.copyOf(dx, size);
+            dy = java.util.Arrays.copyOf(dy, size);
+            dz = java.util.Arrays.copyOf(dz, size);
+        }
+    }
+}
