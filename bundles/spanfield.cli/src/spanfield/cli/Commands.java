@@ -1,0 +1,233 @@
+/* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
+package spanfield.cli;
+
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import spanfield.model.validation.Finding;
+import spanfield.report.CheckReport;
+import spanfield.report.CsvWriter;
+import spanfield.report.EdgeReport;
+import spanfield.report.PointReport;
+import spanfield.report.ProfileReport;
+import spanfield.report.ReportOptions;
+import spanfield.study.StudyCheck;
+import spanfield.study.StudyInputException;
+import spanfield.study.StudyRun;
+import spanfield.study.StudySnapshot;
+import spanfield.study.result.EdgeTable;
+import spanfield.study.result.Evidence;
+import spanfield.study.result.LateralProfile;
+import spanfield.study.result.Notice;
+import spanfield.study.result.PointTable;
+import spanfield.study.result.StationInfo;
+
+/** Does what the verbs say. */
+final class Commands {
+
+    private final Terminal terminal;
+    private final Cancellation cancellation;
+
+    Commands(Terminal terminal, Cancellation cancellation) {
+        this.terminal = terminal;
+        this.cancellation = cancellation;
+    }
+
+    /** Runs a verb. */
+    ExitCode run(Verb verb, Args args) {
+        return switch (verb) {
+            case CHECK -> check(args);
+            case EDGES -> edges(args);
+            case PROFILE -> profile(args);
+            case POINTS -> points(args);
+        };
+    }
+
+    private ExitCode check(Args args) {
+        if (args.operands().isEmpty()) {
+            throw CommandException.argument("check needs at least one study file, for example: " + Verb.CHECK.examples().get(0));
+        }
+        List<Path> studies = args.operands().stream().map(study -> Args.path(study, "the study file")).toList();
+        boolean csv = Settings.csv(args);
+        Results results = new Results(terminal, cancellation, csv, args.path(Args.OUTPUT), studies);
+        StringBuilder out = new StringBuilder();
+        CsvWriter writer = csv ? CheckReport.csv(out) : null;
+        ExitCode code = ExitCode.DONE;
+        for (Path study : studies) {
+            try {
+                List<Finding> findings = StudyCheck.check(Studies.load(study));
+                if (csv) {
+                    CheckReport.csv(study.toString(), findings, writer);
+                } else {
+                    out.append(out.length() > 0 ? "\n" : "").append(CheckReport.text(study.toString(), findings));
+                }
+                boolean sound = findings.stream().noneMatch(Finding::isError);
+                code = sound || code == ExitCode.FILE ? code : ExitCode.STUDY_HAS_ERRORS;
+            } catch (CommandException unreadable) {
+                // The other studies are still worth checking.
+                Main.complain(terminal, unreadable.lines());
+                code = ExitCode.FILE;
+            }
+        }
+        results.write(out.toString(), List.of());
+        return code;
+    }
+
+    private ExitCode edges(Args args) {
+        Path file = Args.path(args.study(), "the study file");
+        Settings settings = Settings.of(args);
+        Results results = new Results(terminal, cancellation, settings.csv(), args.path(Args.OUTPUT), List.of(file));
+        StudySnapshot snapshot = Studies.stations(Studies.snapshot(file, settings), args.all(Args.STATION));
+        EdgeTable table;
+        try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
+            table = new StudyRun().edgeTable(snapshot, progress);
+        }
+        if (settings.csv()) {
+            StringBuilder out = new StringBuilder();
+            EdgeReport.csv(table, settings.units(), out);
+            results.write(out.toString(), List.of());
+            warn(table.evidence());
+        } else {
+            results.write(EdgeReport.text(table, options(settings, results, file)), List.of());
+        }
+        return ExitCode.DONE;
+    }
+
+    private ExitCode profile(Args args) {
+        Path file = Args.path(args.study(), "the study file");
+        Settings settings = Settings.of(args);
+        Results results = new Results(terminal, cancellation, settings.csv(), args.path(Args.OUTPUT), List.of(file));
+        ProfilePictures pictures = ProfilePictures.of(args, results);
+        StudySnapshot snapshot = Studies.snapshot(file, settings);
+        StationInfo station = profileStation(snapshot, args.value(Args.STATION), settings);
+        LateralProfile profile;
+        try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
+            profile = new StudyRun().profile(snapshot, station, progress);
+        } catch (StudyInputException refused) {
+            throw CommandException.argument(refused.getMessage());
+        }
+        StringBuilder out = new StringBuilder();
+        if (settings.csv()) {
+            ProfileReport.csv(profile, settings.units(), out);
+        } else {
+            out.append(ProfileReport.text(profile, options(settings, results, file)));
+        }
+        results.write(out.toString(), pictures.draw(profile, settings));
+        if (settings.csv()) {
+            warn(profile.evidence());
+        }
+        return ExitCode.DONE;
+    }
+
+    private StationInfo profileStation(StudySnapshot snapshot, Optional<String> wanted, Settings settings) {
+        if (wanted.isPresent()) {
+            return Studies.station(snapshot, wanted.get(), settings);
+        }
+        List<StationInfo> stations = snapshot.stations();
+        if (stations.size() > 1) {
+            note("the profile is that of the first station; --station chooses another: "
+                + Studies.join(stations, StationInfo::id, StationInfo::name));
+        }
+        return stations.get(0);
+    }
+
+    private ExitCode points(Args args) {
+        Path file = Args.path(args.study(), "the study file");
+        Settings settings = Settings.of(args);
+        String source = args.value(Args.AT).orElseThrow(() -> CommandException.argument(
+            "points needs --at FILE with the points, or --at - for standard input; see: spanfield help points"));
+        boolean standardInput = source.equals("-");
+        List<Path> inputs = standardInput ? List.of(file) : List.of(file, Args.path(source, "--at"));
+        Results results = new Results(terminal, cancellation, settings.csv(), args.path(Args.OUTPUT), inputs);
+        String name = standardInput ? "standard input" : source;
+        PointsFile points = PointsFile.read(standardInput ? standardInput() : content(inputs.get(1)), name);
+        if (!points.ignored().isEmpty()) {
+            note("columns of " + name + " that are not used: " + String.join(", ", points.ignored()));
+        }
+        StudySnapshot snapshot = Studies.snapshot(file, settings);
+        PointTable table = compute(snapshot, points, name);
+        StringBuilder out = new StringBuilder();
+        if (settings.csv()) {
+            PointReport.csv(table, points.names(), settings.units(), out);
+        } else {
+            out.append(PointReport.text(table, points.names(), options(settings, results, file)));
+        }
+        results.write(out.toString(), List.of());
+        if (settings.csv()) {
+            warn(table.evidence());
+        }
+        return ExitCode.DONE;
+    }
+
+    private PointTable compute(StudySnapshot snapshot, PointsFile points, String source) {
+        try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
+            return new StudyRun().points(snapshot, points.points(), progress);
+        } catch (StudyInputException refused) {
+            List<String> problems = new ArrayList<>();
+            refused.pointProblems().forEach(p -> problems.add(source + ", line " + points.lines().get(p.index()) + ": " + p.message()));
+            if (problems.isEmpty()) {
+                throw CommandException.argument(refused.getMessage());
+            }
+            throw new CommandException(ExitCode.FILE, PointsFile.shortened(problems));
+        }
+    }
+
+    private byte[] standardInput() {
+        try {
+            return terminal.in().readAllBytes();
+        } catch (IOException failure) {
+            throw CommandException.file("standard input cannot be read: " + failure.getMessage());
+        }
+    }
+
+    private static byte[] content(Path file) {
+        try {
+            if (Files.isDirectory(file)) {
+                throw CommandException.file("'" + file + "' is a folder; name a CSV file with points");
+            }
+            return Files.readAllBytes(file);
+        } catch (NoSuchFileException missing) {
+            throw CommandException.file("there is no file '" + file + "'; check the path");
+        } catch (AccessDeniedException denied) {
+            throw CommandException.file("the file '" + file + "' may not be read; check its permissions");
+        } catch (IOException failure) {
+            throw CommandException.file("the file '" + file + "' cannot be read: " + failure.getMessage());
+        }
+    }
+
+    private static ReportOptions options(Settings settings, Results results, Path file) {
+        return new ReportOptions(settings.units(), settings.measure(), results.style(), file.toString());
+    }
+
+    /** CSV has no place for warnings: they go to standard error, so that they are not lost. */
+    private void warn(Evidence evidence) {
+        evidence.notices().stream().filter(notice -> notice.severity() == Notice.Severity.WARNING)
+            .forEach(notice -> note("warning: " + notice.text()));
+    }
+
+    private void note(String text) {
+        terminal.err().println("spanfield: " + text);
+    }
+
+    /** Bytes of something that writes to a stream. */
+    interface Writing {
+
+        void to(ByteArrayOutputStream out) throws IOException;
+    }
+
+    static byte[] bytes(Writing writing) {
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        try {
+            writing.to(out);
+        } catch (IOException failure) {
+            throw new CommandException(ExitCode.COMPUTATION, "the picture cannot be drawn: " + failure.getMessage());
+        }
+        return out.toByteArray();
+    }
+}
