@@ -2,6 +2,7 @@
 package spanfield.solver.field;
 
 import java.util.List;
+import spanfield.solver.PhysicalConstants;
 import spanfield.solver.SolverInputException;
 import spanfield.solver.SolverInputException.Reason;
 import spanfield.solver.earth.EarthReturn;
@@ -17,6 +18,9 @@ final class EarthField {
 
     /** Least height sum in metres at which the half-space integral is evaluated where the ground lies below the earth plane. */
     static final double LEAST_HEIGHT_SUM = 0.5;
+
+    /** Factor of kappa^2 zeta in the singular part of the difference, tesla metre per ampere: mu0/(2 pi) times 2 for the logarithm. */
+    private static final double SINGULAR_PART = PhysicalConstants.MU0 / Math.PI;
 
     private final HalfSpaceIntegral halfSpace;
     private final EarthReturn earth;
@@ -64,69 +68,83 @@ final class EarthField {
     /**
      * Image field at the points of the block, [point][wire * 6 + value], in 1/m.
      *
+     * @param row   interpolation along the block, or null
      * @param error one element; receives the bound of the error of any wire's vector
      */
-    double[][] images(PointBlock block, double[] error) {
-        double[] low = {block.x[0], block.y[0], block.z[0]};
-        double[] high = low.clone();
-        for (int i = 1; i < block.count; i++) {
-            double[] p = {block.x[i], block.y[i], block.z[i]};
-            for (int axis = 0; axis < 3; axis++) {
-                low[axis] = Math.min(low[axis], p[axis]);
-                high[axis] = Math.max(high[axis], p[axis]);
-            }
-        }
-        BlockInterpolation grid = new BlockInterpolation(low, high, distance, relative);
+    double[][] images(PointBlock block, RowInterpolation row, double[] error) {
         double quadrature = 0;
         for (ImageField image : images) {
             quadrature = Math.max(quadrature, image.error());
         }
-        if (grid.size() + 1 < block.count) {
-            double[][] interpolated = interpolate(block, grid);
-            double deviation = deviation(block, interpolated);
-            double allowed = 20 * relative * 2 / distance;
-            if (deviation <= allowed) {
-                error[0] = quadrature + 4 * deviation + relative * 2 / distance;
-                return interpolated;
+        double[][] result = new double[block.count][images.length * VALUES];
+        double interpolation = row == null ? Double.POSITIVE_INFINITY : row.error(distance);
+        if (interpolation <= relative) {
+            double[][] values = new double[row.nodes.count][images.length * VALUES];
+            for (int k = 0; k < values.length; k++) {
+                evaluate(row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], values[k]);
             }
+            for (int i = 0; i < block.count; i++) {
+                row.interpolate(values, i, result[i]);
+            }
+            error[0] = 3 * quadrature + interpolation * 2 / distance;
+            return result;
         }
-        double[][] direct = new double[block.count][images.length * VALUES];
         for (int i = 0; i < block.count; i++) {
-            evaluate(block.x[i], block.y[i], block.z[i], direct[i]);
+            evaluate(block.x[i], block.y[i], block.z[i], result[i]);
         }
         error[0] = quadrature;
-        return direct;
-    }
-
-    private double[][] interpolate(PointBlock block, BlockInterpolation grid) {
-        double[][] values = new double[grid.size()][images.length * VALUES];
-        for (int node = 0; node < values.length; node++) {
-            evaluate(grid.coordinate(node, 0), grid.coordinate(node, 1), grid.coordinate(node, 2), values[node]);
-        }
-        double[][] result = new double[block.count][images.length * VALUES];
-        for (int i = 0; i < block.count; i++) {
-            double[] cardinals = grid.cardinals(block.x[i], block.y[i], block.z[i]);
-            double[] sum = result[i];
-            for (int node = 0; node < values.length; node++) {
-                double c = cardinals[node];
-                double[] v = values[node];
-                for (int j = 0; j < sum.length; j++) {
-                    sum[j] += c * v[j];
-                }
-            }
-        }
         return result;
     }
 
-    /** Greatest component by which interpolation misses direct evaluation, at the first point: the ends are where it is worst. */
-    private double deviation(PointBlock block, double[][] interpolated) {
-        double[] direct = new double[images.length * VALUES];
-        evaluate(block.x[0], block.y[0], block.z[0], direct);
-        double greatest = 0;
-        for (int j = 0; j < direct.length; j++) {
-            greatest = Math.max(greatest, Math.abs(direct[j] - interpolated[0][j]));
+    /**
+     * Exact half-space less complex image of a wire's mean straight line at the points of the block, in tesla per ampere: Re and Im of X, Y, Z,
+     * [point][value].
+     *
+     * <p>The difference has a weak singularity where point and mirrored wire meet, kappa^2 zeta ln zeta; the row is interpolated where that
+     * part is resolved to the wanted accuracy, and evaluated at every point elsewhere.
+     *
+     * @param wanted accuracy in tesla per ampere
+     * @param out    [point][6], overwritten
+     * @return bound of the interpolation error in tesla per ampere
+     */
+    double differences(int wire, PointBlock block, RowInterpolation row, double wanted, double[][] out) {
+        double[] scratch = new double[4];
+        if (row != null) {
+            double gap = mirrorDistance(wire, row);
+            double bound = SINGULAR_PART * Math.pow(earth.complexDepth().abs(), -2) * (gap + row.halfLength()) * row.error(gap);
+            if (bound <= wanted) {
+                double[][] values = new double[row.nodes.count][VALUES];
+                for (int k = 0; k < values.length; k++) {
+                    difference(wire, row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], scratch, values[k]);
+                }
+                for (int i = 0; i < block.count; i++) {
+                    java.util.Arrays.fill(out[i], 0);
+                    row.interpolate(values, i, out[i]);
+                }
+                return bound;
+            }
         }
-        return greatest;
+        for (int i = 0; i < block.count; i++) {
+            difference(wire, block.x[i], block.y[i], block.z[i], scratch, out[i]);
+        }
+        return 0;
+    }
+
+    /** Least distance of a row's points to the mirrored mean line of a wire. */
+    private double mirrorDistance(int wire, RowInterpolation row) {
+        double least = Double.POSITIVE_INFINITY;
+        PointBlock n = row.nodes;
+        for (int k = 0; k < n.count; k++) {
+            double heightSum = heights[wire] + n.z[k] - earth.planeElevationMetres();
+            least = Math.min(least, heightSum < LEAST_HEIGHT_SUM ? 0 : Math.hypot(lateral(wire, n.x[k], n.y[k]), heightSum));
+        }
+        return least;
+    }
+
+    /** Offset of a point to the right of a wire's mean line: right = (dy, -dx) for the direction (dx, dy). */
+    private double lateral(int wire, double x, double y) {
+        double[] line = planLines[wire];
+        return (x - line[0]) * line[3] - (y - line[1]) * line[2];
     }
 
     private void evaluate(double x, double y, double z, double[] out) {
@@ -135,17 +153,10 @@ final class EarthField {
         }
     }
 
-    /**
-     * Exact half-space less complex image of a wire's mean straight line at a point, in tesla per ampere.
-     *
-     * @param out receives Re and Im of X, Y, Z
-     */
-    void difference(int wire, double x, double y, double z, double[] scratch, double[] out) {
+    private void difference(int wire, double x, double y, double z, double[] scratch, double[] out) {
         double[] line = planLines[wire];
-        // offset to the right of the wire's direction (dx, dy): right = (dy, -dx)
-        double lateral = (x - line[0]) * line[3] - (y - line[1]) * line[2];
         double heightSum = Math.max(heights[wire] + z - earth.planeElevationMetres(), LEAST_HEIGHT_SUM);
-        halfSpace.difference(lateral, heightSum, scratch);
+        halfSpace.difference(lateral(wire, x, y), heightSum, scratch);
         out[0] = scratch[0] * line[3];
         out[1] = scratch[1] * line[3];
         out[2] = -scratch[0] * line[2];

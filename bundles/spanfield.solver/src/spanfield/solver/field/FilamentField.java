@@ -4,6 +4,7 @@ package spanfield.solver.field;
 import spanfield.solver.SolverInputException;
 import spanfield.solver.SolverInputException.Reason;
 import spanfield.solver.geometry.CatenarySpan;
+import spanfield.solver.geometry.Position;
 import spanfield.solver.geometry.Wire;
 import spanfield.solver.geometry.WireEnd;
 import spanfield.solver.geometry.WirePath;
@@ -33,10 +34,10 @@ final class FilamentField {
      * Rate of the exponentials of the path in the integrand, in units of half panel over catenary constant: the integrand far away is a
      * product of the depth and its slope.
      */
-    private static final double PATH_RATE = 4;
+    static final double PATH_RATE = 4;
 
     /** Share of the tolerance that one panel may use: a wire rarely has more panels than this that matter. */
-    private static final double PANELS_THAT_MATTER = 20;
+    private static final double PANELS_THAT_MATTER = 10;
 
     /** Half-length of the panel beside the nearest point, in units of the point's distance: e = 1.17, where 16 to 20 nodes reach 1e-7. */
     private static final double NEAR_PANEL = 1.6;
@@ -46,12 +47,14 @@ final class FilamentField {
 
     private final Wire wire;
     private final SpanVectors[] vectors;
+    private final double[] sags;
     private final double scaleLength;
     private final double greatestCoordinate;
 
     FilamentField(Wire wire) {
         this.wire = wire;
         this.vectors = wire.path().spans().stream().map(SpanVectors::new).toArray(SpanVectors[]::new);
+        this.sags = wire.path().spans().stream().mapToDouble(CatenarySpan::greatestDepthMetres).toArray();
         this.greatestCoordinate = wire.path().spans().stream().flatMapToDouble(span -> java.util.stream.DoubleStream.of(
             span.start().x(), span.start().y(), span.start().z(), span.end().x(), span.end().y(), span.end().z())).map(Math::abs).max().orElse(0);
         boolean finite = wire.path().start() == WireEnd.ENDS && wire.path().finish() == WireEnd.ENDS;
@@ -61,30 +64,99 @@ final class FilamentField {
     /**
      * Sums the field of the wire at the points of the block into its sums.
      *
+     * @param row      interpolation along the block for what is far away; null to evaluate everything at every point
      * @param relative accuracy relative to the field of a long straight wire at the distance of the block
      * @return bound of the quadrature error of the vector sum at any point of the block, in 1/m
      */
-    double addTo(PointBlock block, SourceNodes nodes, double relative) {
+    double addTo(PointBlock block, RowInterpolation row, SourceNodes nodes, double relative) {
         double distance = farthest(block);
         double tolerance = relative * Math.min(2 / distance, scaleLength / (distance * distance)) / PANELS_THAT_MATTER;
         nodes.clear();
         double error = 0;
         WirePath path = wire.path();
+        boolean anyFar = false;
         for (int i = 0; i < vectors.length; i++) {
+            if (row != null && spanDistance(row, i) > RowInterpolation.FAR * row.halfLength()) {
+                anyFar = true;
+                continue;
+            }
             CatenarySpan span = path.spans().get(i);
             error += panels(block, nodes, span, vectors[i], 0, span.horizontalLengthMetres(), tolerance);
         }
         block.accumulate(nodes);
         error += rounding(nodes.nearest);
-        if (path.start() == WireEnd.CONTINUES) {
+        boolean startFar = row != null && tailDistance(row, path.first()) > RowInterpolation.FAR * row.halfLength();
+        boolean finishFar = row != null && tailDistance(row, path.last()) > RowInterpolation.FAR * row.halfLength();
+        addTails(block, !startFar, !finishFar);
+        return anyFar || startFar || finishFar ? error + addFar(block, row, nodes, tolerance, startFar, finishFar) : error;
+    }
+
+    /** Far spans and tails: summed at the nodes of the row, and interpolated to its points. */
+    private double addFar(PointBlock block, RowInterpolation row, SourceNodes nodes, double tolerance, boolean startFar, boolean finishFar) {
+        PointBlock far = row.nodes;
+        far.clearSums();
+        nodes.clear();
+        double error = 0;
+        double size = 0;
+        for (int i = 0; i < vectors.length; i++) {
+            double distance = spanDistance(row, i);
+            if (distance > RowInterpolation.FAR * row.halfLength()) {
+                CatenarySpan span = wire.path().spans().get(i);
+                double length = span.horizontalLengthMetres();
+                error += panels(far, nodes, span, vectors[i], 0, length, tolerance);
+                size += Math.min(length / (distance * distance), 2 / distance) * row.error(distance);
+            }
+        }
+        far.accumulate(nodes);
+        addTails(far, startFar, finishFar);
+        if (startFar) {
+            size += row.error(tailDistance(row, wire.path().first())) / tailDistance(row, wire.path().first());
+        }
+        if (finishFar) {
+            size += row.error(tailDistance(row, wire.path().last())) / tailDistance(row, wire.path().last());
+        }
+        row.spread(block);
+        // interpolation passes errors at the nodes on, magnified by its Lebesgue constant, about 3 for these numbers of nodes
+        return 3 * error + size;
+    }
+
+    private void addTails(PointBlock block, boolean start, boolean finish) {
+        WirePath path = wire.path();
+        if (start && path.start() == WireEnd.CONTINUES) {
             SpanVectors v = vectors[0];
             tail(block, v.x0, v.y0, v.z0, -v.tx, -v.ty, -1);
         }
-        if (path.finish() == WireEnd.CONTINUES) {
+        if (finish && path.finish() == WireEnd.CONTINUES) {
             SpanVectors v = vectors[vectors.length - 1];
             tail(block, path.last().x(), path.last().y(), path.last().z(), v.tx, v.ty, 1);
         }
-        return error;
+    }
+
+    /** Lower bound of the distance of a span to any point of a row. */
+    private double spanDistance(RowInterpolation row, int i) {
+        SpanVectors v = vectors[i];
+        CatenarySpan span = wire.path().spans().get(i);
+        double length = span.horizontalLengthMetres();
+        PointBlock n = row.nodes;
+        int last = n.count - 1;
+        double chord = segmentDistance((n.x[0] + n.x[last]) / 2, (n.y[0] + n.y[last]) / 2, (n.z[0] + n.z[last]) / 2, v.x0, v.y0, v.z0,
+            v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz);
+        return chord - sags[i] - row.halfLength();
+    }
+
+    /** Lower bound of the distance of the tail from an attachment to any point of a row; also of the attachment itself. */
+    private double tailDistance(RowInterpolation row, Position from) {
+        PointBlock n = row.nodes;
+        int last = n.count - 1;
+        double x = (n.x[0] + n.x[last]) / 2 - from.x();
+        double y = (n.y[0] + n.y[last]) / 2 - from.y();
+        double z = (n.z[0] + n.z[last]) / 2 - from.z();
+        SpanVectors v = from.equals(wire.path().first()) ? vectors[0] : vectors[vectors.length - 1];
+        double sign = from.equals(wire.path().first()) ? -1 : 1;
+        double along = Math.max(0, sign * (v.tx * x + v.ty * y));
+        x -= sign * along * v.tx;
+        y -= sign * along * v.ty;
+        return Math.sqrt(x * x + y * y + z * z) - row.halfLength();
     }
 
     /**
@@ -106,15 +178,19 @@ final class FilamentField {
     }
 
     /** Greatest distance of a point of the block to the nearest chord, roughly: from the first point, plus the width of the block. */
-    private double farthest(PointBlock block) {
+    double farthest(PointBlock block) {
+        return Math.max(chordDistance(block.x[0], block.y[0], block.z[0]) + width(block), wire.radiusMetres());
+    }
+
+    /** Distance of a point to the nearest chord in metres. */
+    double chordDistance(double x, double y, double z) {
         double nearest = Double.POSITIVE_INFINITY;
         for (int i = 0; i < vectors.length; i++) {
             SpanVectors v = vectors[i];
             double length = wire.path().spans().get(i).horizontalLengthMetres();
-            nearest = Math.min(nearest, segmentDistance(block.x[0], block.y[0], block.z[0], v.x0, v.y0, v.z0,
-                v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz));
+            nearest = Math.min(nearest, segmentDistance(x, y, z, v.x0, v.y0, v.z0, v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz));
         }
-        return Math.max(nearest + width(block), wire.radiusMetres());
+        return nearest;
     }
 
     static double width(PointBlock block) {
@@ -189,7 +265,7 @@ final class FilamentField {
     }
 
     /** Least number of nodes whose error form stays below exp(allowed), or one more than the greatest rule has. */
-    private static int nodesNeeded(double allowed, double rho, double rate) {
+    static int nodesNeeded(double allowed, double rho, double rate) {
         int n = Math.max(GaussRules.LEAST, (int) Math.ceil(-allowed / (2 * Math.log(rho))));
         while (n <= GaussRules.GREATEST && logError(n, rho, rate) > allowed) {
             n++;
@@ -198,7 +274,7 @@ final class FilamentField {
     }
 
     /** Logarithm of the least of exp(rate (r + 1/r) / 2) r^(-2n) over the ellipses r up to rho. */
-    private static double logError(int n, double rho, double rate) {
+    static double logError(int n, double rho, double rate) {
         double r = Math.min(rho, 4 * n / rate);
         return rate * (r + 1 / r) / 2 - 2 * n * Math.log(r);
     }

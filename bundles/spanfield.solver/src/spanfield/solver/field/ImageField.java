@@ -16,6 +16,9 @@ import spanfield.solver.geometry.WirePath;
  */
 final class ImageField {
 
+    /** Share of the tolerance that one span may use. */
+    private static final double SPANS_THAT_MATTER = 8;
+
     private final WirePath path;
     private final SourceNodes nodes = new SourceNodes();
     private final double planeTwice;
@@ -50,13 +53,14 @@ final class ImageField {
             double y = distance / half;
             double rho = Math.sqrt(1 + y * y) + y;
             double scale = FilamentField.ERROR_FACTOR * 2 * half / (distance * distance);
-            double needed = Math.log(Math.max(1, scale * distance / (2 * relative / 8))) / (2 * Math.log(rho));
-            if (needed <= GaussRules.GREATEST) {
-                int n = Math.max(GaussRules.LEAST, (int) Math.ceil(needed));
+            double allowed = Math.min(0, Math.log(relative * 2 / distance / SPANS_THAT_MATTER / scale));
+            double rate = FilamentField.PATH_RATE * half / span.constantMetres();
+            int n = FilamentField.nodesNeeded(allowed, rho, rate);
+            if (n <= GaussRules.GREATEST) {
                 for (int i = 0; i < parts; i++) {
                     nodes.add(span, v, length * i / parts, length * (i + 1) / parts, n);
                 }
-                return parts * scale * Math.exp(-2 * n * Math.log(rho));
+                return parts * scale * Math.exp(FilamentField.logError(n, rho, rate));
             }
         }
     }

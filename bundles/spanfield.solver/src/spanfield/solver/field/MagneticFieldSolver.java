@@ -32,7 +32,13 @@ public final class MagneticFieldSolver {
     private static final double SCALE = PhysicalConstants.MU0 / (4 * Math.PI);
 
     /** Part of the asked accuracy that the quadrature of one wire may use up close to the line. */
-    private static final double SHARE_NEARBY = 0.1;
+    private static final double SHARE_NEARBY = 0.3;
+
+    /** Part of the asked accuracy that the images may use, relative to the image, which is far smaller than the field nearby. */
+    private static final double SHARE_OF_EARTH = 0.03;
+
+    /** Points from which the extent of the points is taken. */
+    private static final int SAMPLES = 16;
 
     /** Phase distance in metres that sets how strongly balanced currents cancel: far coefficients are refined by (this / distance)^2. */
     private static final double CANCELLATION_LENGTH = 10;
@@ -80,7 +86,7 @@ public final class MagneticFieldSolver {
         progress.check();
         TransferCoefficients.Builder result = new TransferCoefficients.Builder(wires.size(), points.size(), earth, accuracy);
         FilamentField[] filaments = wires.stream().map(FilamentField::new).toArray(FilamentField[]::new);
-        double earthRelative = Math.max(FINEST, accuracy.relative() * 0.01 * cancellation(extent(wires, points)));
+        double earthRelative = Math.max(FINEST, accuracy.relative() * SHARE_OF_EARTH * cancellation(extent(filaments, points)));
         EarthField earthField = earth.active() && points.size() > 0 ? new EarthField(wires, points, earth, earthRelative) : null;
         int[] blocks = blocks(points);
         AtomicInteger done = new AtomicInteger();
@@ -103,21 +109,28 @@ public final class MagneticFieldSolver {
 
     private void solveBlock(PointBlock block, FilamentField[] filaments, EarthField earth, Accuracy accuracy, TransferCoefficients.Builder result) {
         SourceNodes nodes = new SourceNodes();
+        double[] relatives = new double[filaments.length];
+        double finest = 1;
+        for (int w = 0; w < filaments.length; w++) {
+            relatives[w] = Math.max(FINEST, accuracy.relative() * SHARE_NEARBY * filaments[w].cancellation(block, CANCELLATION_LENGTH));
+            finest = Math.min(finest, relatives[w]);
+        }
+        RowInterpolation row = RowInterpolation.of(block, finest * 0.1);
         double[] imageError = {0};
-        double[][] images = earth == null ? null : earth.images(block, imageError);
-        double[] scratch = new double[4];
-        double[] difference = new double[EarthField.VALUES];
+        double[][] images = earth == null ? null : earth.images(block, row, imageError);
+        double[][] differences = new double[block.count][EarthField.VALUES];
         for (int w = 0; w < filaments.length; w++) {
             block.clearSums();
-            double relative = Math.max(FINEST, accuracy.relative() * SHARE_NEARBY * filaments[w].cancellation(block, CANCELLATION_LENGTH));
-            double error = filaments[w].addTo(block, nodes, relative) + imageError[0];
+            double error = SCALE * (filaments[w].addTo(block, row, nodes, relatives[w]) + imageError[0]);
+            if (earth != null) {
+                error += earth.differences(w, block, row, SCALE * relatives[w] / filaments[w].farthest(block), differences);
+            }
             for (int i = 0; i < block.count; i++) {
                 int point = block.first + i;
-                result.set(w, point, SCALE * block.sumX[i], SCALE * block.sumY[i], SCALE * block.sumZ[i], SCALE * error);
+                result.set(w, point, SCALE * block.sumX[i], SCALE * block.sumY[i], SCALE * block.sumZ[i], error);
                 if (earth != null) {
                     result.addImage(w, point, SCALE, images[i], w * EarthField.VALUES);
-                    earth.difference(w, block.x[i], block.y[i], block.z[i], scratch, difference);
-                    result.setDifference(w, point, difference);
+                    result.setDifference(w, point, differences[i]);
                 }
             }
         }
@@ -128,11 +141,16 @@ public final class MagneticFieldSolver {
         return Math.min(1, ratio * ratio);
     }
 
-    /** Greatest distance between a point and the first attachment of a wire, in metres, roughly. */
-    private static double extent(List<Wire> wires, ObservationPoints points) {
-        double greatest = 1;
-        for (int i = 0; i < points.size(); i += Math.max(1, points.size() / 16)) {
-            greatest = Math.max(greatest, points.position(i).distanceTo(wires.get(0).path().first()));
+    /** Greatest distance of a point to the nearest wire, in metres, from samples of the points. */
+    private static double extent(FilamentField[] filaments, ObservationPoints points) {
+        double greatest = 0;
+        int step = Math.max(1, points.size() / SAMPLES);
+        for (int i = 0; i < points.size(); i += step) {
+            double nearest = Double.POSITIVE_INFINITY;
+            for (FilamentField filament : filaments) {
+                nearest = Math.min(nearest, filament.chordDistance(points.x(i), points.y(i), points.z(i)));
+            }
+            greatest = Math.max(greatest, nearest);
         }
         return greatest;
     }

@@ -2,6 +2,7 @@
 package spanfield.solver.field;
 
 import spanfield.solver.geometry.CatenarySpan;
+import spanfield.solver.geometry.Hyperbolic;
 
 /**
  * Quadrature nodes on wires: position and weighted path element of each, as arrays that grow. A worker's scratch, not shared.
@@ -10,9 +11,6 @@ import spanfield.solver.geometry.CatenarySpan;
  * for each node.
  */
 final class SourceNodes {
-
-    /** Largest |u| for which the series of sinh u and cosh u - 1 below are exact to double precision: next term 0.5^15/15! = 2e-17. */
-    private static final double SERIES_REACH = 0.5;
 
     double[] x = new double[64];
     double[] y = new double[64];
@@ -39,10 +37,9 @@ final class SourceNodes {
         double c = span.constantMetres();
         boolean straight = Double.isInfinite(c);
         double theta = straight ? 0 : (middle - span.vertexMetres()) / c;
-        double sinh = straight ? 0 : Math.sinh(theta);
+        double sinh = straight ? 0 : Hyperbolic.sinh(theta);
         double cosh = straight ? 1 : Math.sqrt(1 + sinh * sinh);
         double depth = span.depthMetres(middle);
-        boolean series = straight || half / c <= SERIES_REACH;
         for (int i = 0; i < n; i++) {
             double step = half * GaussRules.node(n, i);
             double weight = half * GaussRules.weight(n, i);
@@ -50,8 +47,8 @@ final class SourceNodes {
             double slope = 0;
             if (!straight) {
                 double u = step / c;
-                double sinhU = series ? sinh(u) : Math.sinh(u);
-                double coshU1 = series ? coshLess1(u) : Math.cosh(u) - 1;
+                double sinhU = Hyperbolic.sinh(u);
+                double coshU1 = Hyperbolic.coshLess1(u);
                 d = depth + v.tz * step - c * (cosh * coshU1 + sinh * sinhU);
                 slope = v.tz - (sinh + sinh * coshU1 + cosh * sinhU);
             }
@@ -64,16 +61,6 @@ final class SourceNodes {
             dz[count] = weight * (v.tz + slope * v.ez);
             count++;
         }
-    }
-
-    private static double sinh(double u) {
-        double q = u * u;
-        return u * (1 + q / 6 * (1 + q / 20 * (1 + q / 42 * (1 + q / 72 * (1 + q / 110 * (1 + q / 156))))));
-    }
-
-    private static double coshLess1(double u) {
-        double q = u * u;
-        return q / 2 * (1 + q / 12 * (1 + q / 30 * (1 + q / 56 * (1 + q / 90 * (1 + q / 132 * (1 + q / 182))))));
     }
 
     private void reserve(int n) {

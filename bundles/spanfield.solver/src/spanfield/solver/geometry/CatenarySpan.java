@@ -58,7 +58,7 @@ public final class CatenarySpan {
         }
         requireTaut();
         this.vertex = Double.isInfinite(constant) ? Double.NaN
-            : length / 2 - constant * asinh(rise / (2 * constant * Math.sinh(length / (2 * constant))));
+            : length / 2 - constant * asinh(rise / (2 * constant * Hyperbolic.sinh(length / (2 * constant))));
         requireGentle();
         this.tx = (end.x() - start.x()) / length;
         this.ty = (end.y() - start.y()) / length;
@@ -88,7 +88,7 @@ public final class CatenarySpan {
 
     private void requireGentle() {
         double steepest = Double.isInfinite(constant) ? Math.abs(rise / length)
-            : Math.max(Math.abs(Math.sinh(vertex / constant)), Math.abs(Math.sinh((length - vertex) / constant)));
+            : Math.max(Math.abs(Hyperbolic.sinh(vertex / constant)), Math.abs(Hyperbolic.sinh((length - vertex) / constant)));
         if (steepest > GREATEST_SLOPE) {
             throw new SolverInputException(Reason.VALUE_OUT_OF_RANGE, "The catenary constant of " + constant + " m is too small for a rise of "
                 + rise + " m over " + length + " m: the wire would leave a support with a slope of " + steepest
@@ -147,13 +147,13 @@ public final class CatenarySpan {
     }
 
     private static double midspanSag(double length, double rise, double constant) {
-        double vertex = length / 2 - constant * asinh(rise / (2 * constant * Math.sinh(length / (2 * constant))));
+        double vertex = length / 2 - constant * asinh(rise / (2 * constant * Hyperbolic.sinh(length / (2 * constant))));
         return rise / 2 - climb(constant, vertex, length / 2);
     }
 
     /** z(s) - z(0) of the unswung catenary, in the product form that does not cancel for large constants. */
     private static double climb(double constant, double vertex, double s) {
-        return 2 * constant * Math.sinh((s - 2 * vertex) / (2 * constant)) * Math.sinh(s / (2 * constant));
+        return 2 * constant * Hyperbolic.sinh((s - 2 * vertex) / (2 * constant)) * Hyperbolic.sinh(s / (2 * constant));
     }
 
     /** Attachment at the start. */
@@ -193,13 +193,18 @@ public final class CatenarySpan {
 
     /** Exact length of the wire in metres: L^2 = h^2 + (2 c sinh(S / 2c))^2. Swing does not change it. */
     public double lengthMetres() {
-        double level = Double.isInfinite(constant) ? length : 2 * constant * Math.sinh(length / (2 * constant));
+        double level = Double.isInfinite(constant) ? length : 2 * constant * Hyperbolic.sinh(length / (2 * constant));
         return Math.hypot(rise, level);
     }
 
     /** Sag at mid-span in metres, vertically from the chord, in the unswung plane. */
     public double midspanSagMetres() {
         return depthMetres(length / 2);
+    }
+
+    /** Greatest depth below the chord in metres, in the unswung plane: where the wire runs parallel to the chord. */
+    public double greatestDepthMetres() {
+        return Double.isInfinite(constant) ? 0 : depthMetres(Math.max(0, Math.min(length, vertex + constant * asinh(tz))));
     }
 
     /** Depth below the chord in metres at the horizontal distance s from the start, in the unswung plane. */
@@ -209,7 +214,7 @@ public final class CatenarySpan {
 
     /** Derivative of {@link #depthMetres} (dimensionless). */
     public double depthSlope(double s) {
-        return Double.isInfinite(constant) ? 0 : tz - Math.sinh((s - vertex) / constant);
+        return Double.isInfinite(constant) ? 0 : tz - Hyperbolic.sinh((s - vertex) / constant);
     }
 
     /** Point of the wire at the horizontal distance s along the chord from the start, 0 to the horizontal length. */

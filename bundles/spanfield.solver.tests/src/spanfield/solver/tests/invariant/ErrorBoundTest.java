@@ -39,7 +39,7 @@ class ErrorBoundTest {
         int refusals = 0;
         for (int t = 0; t < WIRES; t++) {
             Wire wire = RandomLines.wire(random, "wire " + t);
-            Position[] points = run(random, RandomLines.pointNear(random, wire), 1 + random.nextInt(20));
+            Position[] points = run(random, RandomLines.pointNear(random, wire), 1 + random.nextInt(t % 3 == 0 ? 90 : 20));
             FieldPhasors field;
             try {
                 field = MagneticFieldSolver.sequential()
