@@ -109,6 +109,11 @@ public final class CorridorPlan {
         return new Edges(interpolate(edges[0], edges[1], stationMetres), interpolate(edges[0], edges[2], stationMetres));
     }
 
+    /** Offsets in metres at which the ground's cross-section has corners, rising, as a new array; empty for a cross slope. */
+    public double[] groundCorners() {
+        return section[0].clone();
+    }
+
     /** Whether the centreline has bends. */
     public boolean bent() {
         return centreline.legCount() > 1;

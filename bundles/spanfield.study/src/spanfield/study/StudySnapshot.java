@@ -165,13 +165,8 @@ public final class StudySnapshot {
      * @throws StudyInputException where the model needs what the study does not have
      */
     public StudySnapshot withEarthModel(EarthModel model) {
-        StudySnapshot result = changed(relativeAccuracy(), model, prepared.data().cases(), prepared.data().stations(),
-            model == earthModel() ? null : "The earth model was chosen on request; the study states another.");
-        String problem = StudyRunner.problemWithEarth(result.prepared);
-        if (problem != null) {
-            throw new StudyInputException(problem);
-        }
-        return result;
+        return new StudySnapshot(StudyRunner.withEarthModel(prepared, model),
+            identity(model == earthModel() ? null : "The earth model was chosen on request; the study states another."));
     }
 
     /**
@@ -210,12 +205,15 @@ public final class StudySnapshot {
     }
 
     private StudySnapshot changed(double accuracy, EarthModel model, List<CaseData> cases, List<StationData> stations, String change) {
+        return new StudySnapshot(prepared.with(accuracy, model, cases, stations), identity(change));
+    }
+
+    private StudyIdentity identity(String change) {
         List<String> changes = new ArrayList<>(identity.changes());
         if (change != null) {
             changes.add(change);
         }
-        return new StudySnapshot(prepared.with(accuracy, model, cases, stations),
-            new StudyIdentity(identity.digest(), identity.findings(), changes));
+        return new StudyIdentity(identity.digest(), identity.findings(), changes);
     }
 
     PreparedStudy prepared() {

@@ -6,6 +6,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import spanfield.solver.earth.EarthModel;
+import spanfield.solver.geometry.WireEnd;
 import spanfield.solver.line.ImpedanceFormula;
 import spanfield.study.SoftwareVersion;
 import spanfield.study.internal.ParallelGroups.Uncoupled;
@@ -207,6 +208,11 @@ final class EvidenceWriter {
         if (lowest + least - 2 * study.earthPlane() < LEAST_HEIGHT_SUM_METRES) {
             notices.add(Notice.warning("Some field points lie so far below the earth plane at " + Texts.number(study.earthPlane())
                 + " m, the mean ground level under the lines, that the earth's part of the field is taken at a substitute height there."));
+        }
+        boolean ends = data.lines().stream().anyMatch(l -> l.start() == WireEnd.ENDS || l.finish() == WireEnd.ENDS);
+        if (data.earthModel() == EarthModel.EXACT_HALF_SPACE && ends) {
+            notices.add(Notice.information("The exact half-space correction takes wires that end as endless ones; complex images end with them. "
+                + "Compare with complex images near and beyond a dead end."));
         }
         if (data.earthModel() == EarthModel.EXACT_HALF_SPACE && turn > NOTABLE_TURN_DEGREES) {
             notices.add(Notice.information("Wires turn by up to " + Texts.number(turn) + " degrees from their mean direction: the exact half-space "

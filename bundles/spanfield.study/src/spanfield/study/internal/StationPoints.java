@@ -9,7 +9,8 @@ import spanfield.study.result.StationGeometry.WireAtStation;
 import spanfield.study.result.StationInfo;
 
 /**
- * Offsets at which the field is computed at a station: those of the profile, both edges, and enough in between to see every maximum.
+ * Offsets at which the field is computed at a station: those of the profile, both edges, corners of the ground, and enough in
+ * between to see every maximum.
  * Immutable.
  */
 final class StationPoints {
@@ -42,6 +43,10 @@ final class StationPoints {
         Arrays.stream(asked).forEach(o -> add(all, o));
         add(all, edges.leftOffsetMetres());
         add(all, edges.rightOffsetMetres());
+        // The field along the profile has a corner where the ground has one, and a maximum may sit in it.
+        double first = all.first();
+        double last = all.last();
+        Arrays.stream(plan.groundCorners()).filter(o -> o > first && o < last).forEach(o -> add(all, o));
         double step = Math.max(LEAST_STEP_METRES, STEP_PER_DISTANCE * DISTANCE_PER_CLEARANCE * clearance);
         Double before = null;
         for (double offset : all.toArray(Double[]::new)) {

@@ -114,22 +114,27 @@ public final class StudyRunner {
             || GeometryChecks.imageHeightSum(study.data(), study.earthPlane(), state, elevation) > 0;
     }
 
-    /** Whether the stations of the study can be computed under its earth model; the message of what is wrong, or null. */
-    public static String problemWithEarth(PreparedStudy study) {
-        if (study.data().earthModel() != EarthModel.NONE && (Double.isNaN(study.data().resistivity()) || study.data().frequencyHertz() == 0)) {
-            return study.data().frequencyHertz() == 0 ? "Direct current has no earth effect: choose no earth model."
-                : "The study has no earth resistivity: give one in the study, or choose no earth model.";
+    /**
+     * The study under another earth model.
+     *
+     * @throws StudyInputException where the study lacks what the model needs, or a station lies below every image
+     */
+    public static PreparedStudy withEarthModel(PreparedStudy study, EarthModel model) {
+        if (model != EarthModel.NONE && study.data().frequencyHertz() == 0) {
+            throw new StudyInputException("Direct current has no earth effect: choose no earth model.");
         }
+        if (model != EarthModel.NONE && Double.isNaN(study.data().resistivity())) {
+            throw new StudyInputException("The study has no earth resistivity: give one in the study, or choose no earth model.");
+        }
+        PreparedStudy changed = study.with(study.data().relativeAccuracy(), model, study.data().cases(), study.data().stations());
         for (StationData station : study.data().stations()) {
             double lowest = ProfileGrid.of(station.info(), study.data().plan(), study.data().referenceHeight()).lowest();
-            for (GeometryState state : states(study)) {
-                if (!imageDefined(study, state, lowest)) {
-                    return "Station '" + station.info().name() + "' lies so far below the earth plane that no complex image exists: "
-                        + "choose no earth model.";
-                }
+            if (!states(changed).stream().allMatch(state -> imageDefined(changed, state, lowest))) {
+                throw new StudyInputException("Station '" + station.info().name() + "' lies so far below the earth plane that no complex image "
+                    + "exists: choose no earth model.");
             }
         }
-        return null;
+        return changed;
     }
 
     /** What keeps chosen points from being computed. */
