@@ -8,7 +8,7 @@ import java.util.concurrent.TimeUnit;
  * Stops the command cleanly when the process is told to end (interrupt key, termination): the computation is cancelled, files that are not
  * complete are removed, and the exit code is that of a cancelled computation.
  */
-final class Cancellation {
+public final class Cancellation {
 
     /** Time in seconds that the command gets to end by itself: the solver looks for cancellation many times a second. */
     private static final long PATIENCE_SECONDS = 3;
@@ -25,7 +25,7 @@ final class Cancellation {
     }
 
     /** Asks the computation to stop. */
-    void cancel() {
+    public void cancel() {
         cancelled = true;
     }
 

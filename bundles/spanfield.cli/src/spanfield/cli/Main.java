@@ -47,8 +47,12 @@ public final class Main {
         return code.number();
     }
 
-    /** Runs the command. Never throws. */
-    static ExitCode run(List<String> arguments, Terminal terminal, Cancellation cancellation) {
+    /**
+     * Runs the command with given streams. Never throws; the exit code says how it went.
+     *
+     * @param arguments verb, operands and options
+     */
+    public static ExitCode run(List<String> arguments, Terminal terminal, Cancellation cancellation) {
         try {
             return dispatch(arguments, terminal, cancellation);
         } catch (CommandException problem) {
@@ -105,9 +109,8 @@ public final class Main {
     private static Verb verb(String word) {
         List<String> known = new ArrayList<>(Verb.words());
         known.add("help");
-        return Verb.ofWord(word).orElseThrow(() -> CommandException.argument("unknown verb '" + word + "'"
-            + Suggestions.nearest(word, known).map(near -> "; did you mean '" + near + "'?")
-                .orElse("; the verbs are " + String.join(", ", known))));
+        return Verb.ofWord(word).orElseThrow(() -> CommandException.argument("unknown verb '" + word + "'; the verbs are "
+            + String.join(", ", known) + Suggestions.hint(word, known)));
     }
 
     private static void print(Terminal terminal, String text) {

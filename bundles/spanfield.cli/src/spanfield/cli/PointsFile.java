@@ -80,6 +80,9 @@ record PointsFile(List<FieldPoint> points, List<String> names, List<Integer> lin
             Map<String, LengthUnit> units = new LinkedHashMap<>();
             List<String> ignored = new ArrayList<>();
             int name = -1;
+            if (row.fields().size() == 1 && row.fields().get(0).matches("(?s).*[;\t].*")) {
+                throw bad(source, row, "is not separated by commas; separate columns by commas, and write numbers with a decimal dot");
+            }
             for (int i = 0; i < row.fields().size(); i++) {
                 String title = row.fields().get(i).strip().toLowerCase(Locale.ROOT);
                 Optional<String> quantity = QUANTITIES.stream().filter(q -> title.equals(q) || title.startsWith(q + "_")).findFirst();
@@ -110,9 +113,7 @@ record PointsFile(List<FieldPoint> points, List<String> names, List<Integer> lin
         private static void requireAll(Map<String, Integer> columns, CsvRecords.Row row, String source) {
             for (String quantity : QUANTITIES) {
                 if (!columns.containsKey(quantity)) {
-                    boolean otherSeparator = row.fields().size() == 1 && row.fields().get(0).matches("(?s).*[;\t].*");
-                    throw bad(source, row, "has no column " + quantity + "_m (or " + quantity + "_ft)"
-                        + (otherSeparator ? "; separate columns by commas, and write numbers with a decimal dot" : ""));
+                    throw bad(source, row, "has no column " + quantity + "_m (or " + quantity + "_ft)");
                 }
             }
         }

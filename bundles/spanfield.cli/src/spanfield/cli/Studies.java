@@ -11,6 +11,7 @@ import java.util.function.Function;
 import spanfield.model.Study;
 import spanfield.model.io.StudyFileException;
 import spanfield.model.io.StudyFiles;
+import spanfield.solver.earth.EarthModel;
 import spanfield.study.StudyInputException;
 import spanfield.study.StudySnapshot;
 import spanfield.study.result.CaseInfo;
@@ -44,11 +45,25 @@ final class Studies {
                 snapshot = snapshot.withCases(ids(settings.cases(), snapshot.cases(), CaseInfo::id, CaseInfo::name, "load case"));
             }
             if (settings.earth().isPresent()) {
+                requireEarth(snapshot, settings.earth().get());
                 snapshot = snapshot.withEarthModel(settings.earth().get());
             }
             return settings.accuracy().isPresent() ? snapshot.withAccuracy(settings.accuracy().get()) : snapshot;
         } catch (StudyInputException refused) {
             throw CommandException.argument(refused.getMessage());
+        }
+    }
+
+    /** An earth model needs a resistivity and an alternating field. */
+    private static void requireEarth(StudySnapshot snapshot, EarthModel model) {
+        if (model == EarthModel.NONE) {
+            return;
+        }
+        if (snapshot.frequencyHertz() == 0) {
+            throw CommandException.argument("the study is of direct current, which has no earth effect; leave --earth away, or choose none");
+        }
+        if (snapshot.earthResistivityOhmMetres().isEmpty()) {
+            throw CommandException.argument("the study has no earth resistivity, which this --earth needs; give one in the study, or choose none");
         }
     }
 
@@ -87,8 +102,7 @@ final class Studies {
     }
 
     static String unknown(String what, String word, Collection<String> known, String rest) {
-        return "unknown " + what + " '" + word + "'; " + Suggestions.nearest(word, known).map(near -> "did you mean '" + near + "'? ").orElse("")
-            + rest;
+        return "unknown " + what + " '" + word + "'; " + rest + Suggestions.hint(word, known);
     }
 
     private static <T> Set<String> names(List<T> all, Function<T, String> id, Function<T, String> name) {

@@ -33,21 +33,21 @@ final class Suggestions {
         return nearest(word, known).map(near -> "; did you mean '" + near + "'?").orElse("");
     }
 
-    /** Letters to insert, remove or replace (Levenshtein 1966). */
+    /** Letters to insert, remove, replace or swap with the next (Levenshtein 1966, Damerau 1964; each pair swapped at most once). */
     private static int distance(String a, String b) {
-        int[] row = new int[b.length() + 1];
-        for (int j = 0; j <= b.length(); j++) {
-            row[j] = j;
-        }
-        for (int i = 1; i <= a.length(); i++) {
-            int diagonal = row[0];
-            row[0] = i;
-            for (int j = 1; j <= b.length(); j++) {
-                int change = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                diagonal = row[j];
-                row[j] = Math.min(change, Math.min(row[j], row[j - 1]) + 1);
+        int[][] cost = new int[a.length() + 1][b.length() + 1];
+        for (int i = 0; i <= a.length(); i++) {
+            for (int j = 0; j <= b.length(); j++) {
+                if (i == 0 || j == 0) {
+                    cost[i][j] = i + j;
+                    continue;
+                }
+                int change = cost[i - 1][j - 1] + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
+                cost[i][j] = Math.min(change, Math.min(cost[i - 1][j], cost[i][j - 1]) + 1);
+                boolean swapped = i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1);
+                cost[i][j] = swapped ? Math.min(cost[i][j], cost[i - 2][j - 2] + 1) : cost[i][j];
             }
         }
-        return row[b.length()];
+        return cost[a.length()][b.length()];
     }
 }

@@ -19,12 +19,12 @@ import java.util.Objects;
  * @param charset     character set of text on standard output; files and CSV are always UTF-8
  * @param interactive whether standard error is a terminal, so that progress may be shown
  */
-record Terminal(InputStream in, OutputStream out, PrintStream err, Charset charset, boolean interactive) {
+public record Terminal(InputStream in, OutputStream out, PrintStream err, Charset charset, boolean interactive) {
 
     /** Property that the launcher sets to true when standard error is a terminal: Java 17 cannot tell by itself. */
-    static final String INTERACTIVE_PROPERTY = "spanfield.terminal";
+    public static final String INTERACTIVE_PROPERTY = "spanfield.terminal";
 
-    Terminal {
+    public Terminal {
         Objects.requireNonNull(in);
         Objects.requireNonNull(out);
         Objects.requireNonNull(err);

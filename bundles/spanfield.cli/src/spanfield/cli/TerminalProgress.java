@@ -5,7 +5,7 @@ import java.io.PrintStream;
 import spanfield.solver.Progress;
 
 /** Progress of a computation as one line on a terminal, shown only when the work takes long enough to wonder. */
-final class TerminalProgress implements Progress, AutoCloseable {
+public final class TerminalProgress implements Progress, AutoCloseable {
 
     private static final long FIRST_NANOS = 700_000_000L;
     private static final long STEP_NANOS = 100_000_000L;
@@ -15,7 +15,8 @@ final class TerminalProgress implements Progress, AutoCloseable {
     private long next;
     private int width;
 
-    TerminalProgress(Terminal terminal, Cancellation cancellation) {
+    /** Shows progress on the standard error of a terminal and listens to a cancellation. */
+    public TerminalProgress(Terminal terminal, Cancellation cancellation) {
         this.terminal = terminal;
         this.cancellation = cancellation;
         this.next = System.nanoTime() + FIRST_NANOS;

@@ -125,7 +125,7 @@ final class FieldLabels extends AbstractXYAnnotation {
 
     /** Outside the right-of-way at the top first, then inside, then further down. */
     private static List<Rectangle2D> edgePlaces(FontMetrics metrics, EdgeLine edge, Scale scale) {
-        double width = metrics.stringWidth(edge.label());
+        double width = Labels.width(edge.label(), FONT);
         double x = scale.x(edge.offset());
         double left = x - GAP - width;
         double right = x + GAP;
@@ -140,7 +140,7 @@ final class FieldLabels extends AbstractXYAnnotation {
 
     /** On the line near its right end first, then beneath, then along the line to its left end. */
     private static List<Rectangle2D> limitPlaces(FontMetrics metrics, LimitLine limit, Scale scale) {
-        double width = metrics.stringWidth(limit.label());
+        double width = Labels.width(limit.label(), FONT);
         double y = scale.y(limit.level());
         double first = Math.max(scale.area().getMinX(), scale.x(limit.from())) + GAP;
         double last = Math.min(scale.area().getMaxX(), scale.x(limit.to())) - GAP - width;

@@ -4,6 +4,7 @@ package spanfield.report.plot;
 import java.awt.Color;
 import java.awt.Font;
 import java.awt.Graphics2D;
+import java.awt.font.FontRenderContext;
 import java.awt.geom.Rectangle2D;
 
 /** Text on a drawing. */
@@ -23,6 +24,16 @@ final class Labels {
         g2.setPaint(colour);
         g2.drawString(text, (float) place.getX(), (float) place.getY() + g2.getFontMetrics(font).getAscent());
     }
+
+    /**
+     * Width of text as it is drawn at any scale. The metrics of a graphics would round every letter to whole pixels, some per cent too wide
+     * for an SVG.
+     */
+    static double width(String text, Font font) {
+        return font.getStringBounds(text, UNROUNDED).getWidth();
+    }
+
+    private static final FontRenderContext UNROUNDED = new FontRenderContext(null, true, true);
 
     /** A number as text with a true minus sign. */
     static String minus(String number) {

@@ -25,6 +25,7 @@ import org.jfree.chart.plot.IntervalMarker;
 import org.jfree.chart.plot.ValueMarker;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.text.TextUtils;
 import org.jfree.chart.title.LegendTitle;
 import org.jfree.chart.title.TextTitle;
 import org.jfree.chart.ui.HorizontalAlignment;
@@ -86,8 +87,10 @@ final class ProfileChart {
     }
 
     JFreeChart chart() {
+        // Otherwise the library draws turned text as outlines, and the labels of the range axes would be no text in an SVG.
+        TextUtils.setUseDrawRotatedStringWorkaround(false);
         NumberAxis offsets = axis("Offset from the centreline, " + length() + " (positive to the right, looking ahead)");
-        offsets.setRange(x(profile.station().fromOffsetMetres()), x(profile.station().toOffsetMetres()));
+        offsets.setRange(x(firstOffset()), x(lastOffset()));
         CombinedDomainXYPlot plot = new CombinedDomainXYPlot(offsets);
         plot.setGap(14);
         plot.add(fieldPlot(), FIELD_WEIGHT);
@@ -101,6 +104,22 @@ final class ProfileChart {
         chart.addSubtitle(legend());
         return chart;
     }
+
+    /** The edges are always on the drawing, with a little room, even when the profile does not reach them. */
+    private double firstOffset() {
+        return Math.min(profile.station().fromOffsetMetres(), profile.leftEdgeOffsetMetres() - EDGE_ROOM * width());
+    }
+
+    private double lastOffset() {
+        return Math.max(profile.station().toOffsetMetres(), profile.rightEdgeOffsetMetres() + EDGE_ROOM * width());
+    }
+
+    private double width() {
+        return profile.rightEdgeOffsetMetres() - profile.leftEdgeOffsetMetres();
+    }
+
+    /** Room beside an edge as a part of the width of the right-of-way. */
+    private static final double EDGE_ROOM = 0.02;
 
     private double x(double metres) {
         return units.length().fromMetres(metres);
@@ -233,8 +252,8 @@ final class ProfileChart {
         double left = x(profile.leftEdgeOffsetMetres());
         double right = x(profile.rightEdgeOffsetMetres());
         boolean within = limit.place() == LimitPlace.WITHIN;
-        double from = within ? left : x(profile.station().fromOffsetMetres());
-        double to = within ? right : x(profile.station().toOffsetMetres());
+        double from = within ? left : x(firstOffset());
+        double to = within ? right : x(lastOffset());
         List<Double> marks = limit.place() == LimitPlace.EDGE ? List.of(left, right) : List.of();
         return new FieldLabels.LimitLine(text, y(limit.levelTesla()), from, to, marks);
     }

@@ -107,7 +107,7 @@ final class SectionLabels extends AbstractXYAnnotation {
         if (wire.label().isEmpty()) {
             return;
         }
-        for (Rectangle2D place : places(metrics.stringWidth(wire.label()), metrics.getAscent(), x, y)) {
+        for (Rectangle2D place : places(Labels.width(wire.label(), FONT), metrics.getAscent(), x, y)) {
             if (placer.takeIfFree(place)) {
                 g2.setPaint(PlotStyle.INK);
                 g2.drawString(wire.label(), (float) place.getX(), (float) place.getMaxY() - 1);
