@@ -12,8 +12,12 @@ import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import spanfield.model.Bonding;
 import spanfield.model.GroundPoint;
+import spanfield.model.Line;
+import spanfield.model.ShieldWire;
 import spanfield.model.SpanfieldFactory;
+import spanfield.model.StructureType;
 import spanfield.solver.Progress;
 import spanfield.study.FieldPoint;
 import spanfield.study.StudyInputException;
@@ -73,6 +77,71 @@ class AccuracyTest {
                 assertTrue(row.greatestResultant().field().numericalErrorTesla() <= relative * row.greatestResultant().field().resultantTesla());
             }
         }
+    }
+
+    @Test
+    void accuracyFarAwayWherePhasesCancel_isReachedByRefinement() {
+        StudyMaker m = new StudyMaker();
+        StructureType type = m.type("tower");
+        for (int i = 0; i < 3; i++) {
+            StudyMaker.attach(type, "L" + i, -6, 34 - 8 * i);
+            StudyMaker.attach(type, "R" + i, 6, 34 - 8 * i);
+        }
+        Line line = m.line("line", type, StudyMaker.sag(8), 0, -600, -300, 0, 300, 600);
+        // low-reactance phasing: the field falls with the cube of the distance
+        StudyMaker.load(m.loadCase("rating"), m.circuit(line, "left", 132e3, "L0", "L1", "L2"), 500, 0);
+        StudyMaker.load(m.loadCase(), m.circuit(line, "right", 132e3, "R2", "R1", "R0"), 500, 0);
+        m.station("s", 150, -50, 50, 5);
+        StudySnapshot snapshot = StudySnapshot.of(m.study).withAccuracy(1e-8);
+        StudyRun run = new StudyRun();
+        PointTable table = run.points(snapshot, List.of(new FieldPoint(150, 0, 1), new FieldPoint(150, 700, 1), new FieldPoint(150, -1500, 1)),
+            Progress.NONE);
+        assertTrue(run.solveCount() > 1, "one solve is not enough here, or this test tests nothing");
+        assertTrue(table.evidence().accuracyReached() <= 1e-8, "reached " + table.evidence().accuracyReached());
+    }
+
+    /** Relative; as PLACE, for wires 2 m away: 3 (0.0005 m / 2 m)^2 = 2e-7, and the dense profile's own 3 (0.005 m / 2 m)^2 = 2e-5. */
+    private static final double NEAR_PLACE = 2e-5;
+
+    @Test
+    void greatestOfSeveralPeaks_isFoundWhereverTheCoarsePointsLie() {
+        Random random = new Random(77);
+        for (int trial = 0; trial < 25; trial++) {
+            StudyMaker m = new StudyMaker();
+            m.study.setReferenceHeightMetres(8);
+            StructureType type = m.type("wide");
+            // wires 2 m above the points and far apart: a peak under each, all three within about half a per cent, the middle wire hung a
+            // little higher for that
+            for (int i = 0; i < 3; i++) {
+                StudyMaker.attach(type, "T" + i, 12 * i - 12, (i == 1 ? 10.033 : 10) + 0.01 * random.nextDouble());
+            }
+            Line line = m.line("line", type, StudyMaker.sag(StudyMaker.STRAIGHT_SAG), 0, -300, 0, 300);
+            StudyMaker.load(m.loadCase("rating"), m.circuit(line, "circuit", 33e3, "T0", "T1", "T2"), 500, 0);
+            double shift = 2 * random.nextDouble();
+            m.station("s", 0, -20 + shift, 20 + shift, 19.7);
+            StudySnapshot snapshot = StudySnapshot.of(m.study);
+            StudyRun run = new StudyRun();
+            double found = run.edgeTable(snapshot, Progress.NONE).rows().get(0).greatestResultant().field().resultantTesla();
+            double[] dense = run.profile(snapshot, StationInfo.at(0, -25, 25, 0.01), Progress.NONE).cases().get(0).series().resultantsTesla();
+            double greatest = java.util.Arrays.stream(dense).max().orElseThrow();
+            assertEquals(greatest, found, NEAR_PLACE * greatest, "trial " + trial);
+            assertTrue(found >= greatest * (1 - PLACE * 9), "trial " + trial);
+        }
+    }
+
+    @Test
+    void narrowPeakBetweenCoarsePoints_isNotMissed() {
+        StudyMaker m = StudyMaker.plain();
+        // a wire with 20 A only 0.3 m above the points: 13 microtesla within a quarter of a metre of it, beside some 8 of the line
+        StudyMaker.attach(m.study.getStructureTypes().get(0), "S", 14.1, 1.3);
+        ShieldWire low = m.shield(m.line(), "low", "S", Bonding.GIVEN_CURRENT);
+        low.setGivenCurrentAmperes(20);
+        m.line().getSections().get(0).setShieldStringing(StudyMaker.sag(StudyMaker.STRAIGHT_SAG));
+        m.study.getStations().get(0).setSpacingMetres(25);
+        EdgeRow row = Runs.table(m.study).rows().get(0);
+        assertEquals(14.1, row.greatestResultant().offsetMetres(), 0.1, "metres; the line's field moves the peak a little");
+        // mu0 I / (2 pi d) of the wire, less at most what the line adds there against it
+        assertTrue(row.greatestResultant().field().resultantTesla() > 2e-7 * 20 / 0.3 - 6e-6, row.greatestResultant().toString());
     }
 
     @Test

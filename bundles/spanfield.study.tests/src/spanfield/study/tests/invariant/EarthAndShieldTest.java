@@ -140,6 +140,42 @@ class EarthAndShieldTest {
     }
 
     @Test
+    void bundle_inducesNearlyWhatASingleConductorDoes() {
+        StudyMaker m = straightLine(Bonding.BONDED);
+        Phasor single = Runs.table(m.study).evidence().currents().get(0).shieldWires().get(0).amperes();
+        StudyMaker.bundle(m.circuit(), 4, 0.4);
+        Phasor bundle = Runs.table(m.study).evidence().currents().get(0).shieldWires().get(0).amperes();
+        // the square of the bundle's radius over the distance to the shield wire, (0.28 m / 8 m)^2 = 1e-3, and some cancellation
+        assertEquals(0, single.plus(bundle.negated()).magnitude(), 5e-3 * single.magnitude(), "amperes of " + single.magnitude());
+    }
+
+    @Test
+    void lineAtAnAngleToTheCorridor_hasTheShieldCurrentOfTheLineAlongIt() {
+        List<Phasor> currents = new ArrayList<>();
+        for (double degrees : new double[] {0, 30}) {
+            StudyMaker m = straightLine(Bonding.BONDED);
+            StructureType type = m.type("neighbour");
+            StudyMaker.attach(type, "X", -5, 18);
+            StudyMaker.attach(type, "Y", 0, 18);
+            StudyMaker.attach(type, "Z", 5, 18);
+            Line other = m.line("other", type, StudyMaker.sag(StudyMaker.STRAIGHT_SAG), 40, -600, 0, 600);
+            StudyMaker.load(m.loadCase(), m.circuit(other, "second", 132e3, "X", "Y", "Z"), 1000, 0);
+            double cos = Math.cos(Math.toRadians(degrees));
+            double sin = Math.sin(Math.toRadians(degrees));
+            for (Line line : m.study.getLines()) {
+                for (var structure : line.getStructures()) {
+                    double x = structure.getOffsetMetres();
+                    double y = structure.getStationMetres();
+                    structure.setOffsetMetres(x * cos + y * sin);
+                    structure.setStationMetres(y * cos - x * sin);
+                }
+            }
+            currents.add(Runs.table(m.study).evidence().currents().get(0).shieldWires().get(0).amperes());
+        }
+        assertEquals(0, currents.get(0).plus(currents.get(1).negated()).magnitude(), 1e-9 * currents.get(0).magnitude(), "amperes");
+    }
+
+    @Test
     void carsonsIntegral_changesTheShieldCurrentByAFewPerCentAtMost() {
         StudyMaker m = straightLine(Bonding.BONDED);
         Phasor deri = Runs.table(m.study).evidence().currents().get(0).shieldWires().get(0).amperes();

@@ -12,6 +12,7 @@ import spanfield.model.AlignmentBend;
 import spanfield.model.CurrentLoad;
 import spanfield.model.ElevationPoint;
 import spanfield.model.PowerLoad;
+import spanfield.model.SequenceLoad;
 import spanfield.model.SpanfieldFactory;
 import spanfield.model.Study;
 import spanfield.model.io.StudyFiles;
@@ -97,6 +98,33 @@ class SymmetryTest {
         assertSame(byCurrent, byPower, ROUNDING, "power");
         assertEquals(-25, byPower.evidence().currents().get(0).circuits().get(0).phases().get(0).amperes().angleDegrees(), 1e-9,
             "lagging current of phase A in degrees");
+    }
+
+    @Test
+    void loadBySequences_isTheLoadByItsPhaseCurrents() {
+        StudyMaker m = StudyMaker.plain();
+        SequenceLoad load = SpanfieldFactory.eINSTANCE.createSequenceLoad();
+        load.setCircuit(m.circuit());
+        load.setPositiveAmperes(400);
+        load.setPositiveAngleDegrees(10);
+        load.setNegativeAmperes(60);
+        load.setNegativeAngleDegrees(-30);
+        load.setZeroAmperes(20);
+        load.setZeroAngleDegrees(50);
+        m.loadCase().getLoads().set(0, load);
+        var phases = Runs.table(m.study).evidence().currents().get(0).circuits().get(0).phases();
+        // Fortescue 1918: the positive sequence turns by -120 and +120 degrees from A to B and C, the negative the other way
+        double[][] turns = {{0, 0}, {-120, 120}, {120, -120}};
+        for (int i = 0; i < 3; i++) {
+            double real = 400 * cos(10 + turns[i][0]) + 60 * cos(-30 + turns[i][1]) + 20 * cos(50);
+            double imaginary = 400 * cos(10 + turns[i][0] - 90) + 60 * cos(-30 + turns[i][1] - 90) + 20 * cos(50 - 90);
+            assertEquals(real, phases.get(i).amperes().real(), 1e-9, "amperes, phase " + phases.get(i).phase());
+            assertEquals(imaginary, phases.get(i).amperes().imaginary(), 1e-9, "amperes, phase " + phases.get(i).phase());
+        }
+    }
+
+    private static double cos(double degrees) {
+        return Math.cos(Math.toRadians(degrees));
     }
 
     @Test

@@ -266,6 +266,15 @@ class WireGeometryTest {
     }
 
     @Test
+    void clearanceAtAStation_isThatOfTheLowestSubconductor() {
+        StudyMaker m = StudyMaker.plain();
+        StudyMaker.bundle(m.circuit(), 4, 0.4);
+        StationGeometry geometry = Runs.table(m.study).evidence().geometry().get(0);
+        assertEquals(10 - 0.2, geometry.clearances().get(0).clearanceMetres(), ROUNDING, "half a side below the centre");
+        assertEquals(0.2 * Math.sqrt(2), geometry.wires().get(0).bundleRadiusMetres(), ROUNDING);
+    }
+
+    @Test
     void wiresAtAStationBeyondTheStructures_areOnTheirTails() {
         StudyMaker m = StudyMaker.plain();
         m.study.getStations().get(0).setStationMetres(800);
