@@ -1,15 +1,16 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.cli;
 
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
+import java.util.function.Function;
 import spanfield.model.validation.Finding;
 import spanfield.report.CheckReport;
 import spanfield.report.CsvWriter;
@@ -17,6 +18,7 @@ import spanfield.report.EdgeReport;
 import spanfield.report.PointReport;
 import spanfield.report.ProfileReport;
 import spanfield.report.ReportOptions;
+import spanfield.solver.Progress;
 import spanfield.study.StudyCheck;
 import spanfield.study.StudyInputException;
 import spanfield.study.StudyRun;
@@ -75,7 +77,7 @@ final class Commands {
                 code = ExitCode.FILE;
             }
         }
-        results.write(out.toString(), List.of());
+        results.write(text(out.toString()), List.of());
         return code;
     }
 
@@ -84,18 +86,10 @@ final class Commands {
         Settings settings = Settings.of(args);
         Results results = new Results(terminal, cancellation, settings.csv(), args.path(Args.OUTPUT), List.of(file));
         StudySnapshot snapshot = Studies.stations(Studies.snapshot(file, settings), args.all(Args.STATION));
-        EdgeTable table;
-        try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
-            table = new StudyRun().edgeTable(snapshot, progress);
-        }
-        if (settings.csv()) {
-            StringBuilder out = new StringBuilder();
-            EdgeReport.csv(table, settings.units(), out);
-            results.write(out.toString(), List.of());
-            warn(table.evidence());
-        } else {
-            results.write(EdgeReport.text(table, options(settings, results, file)), List.of());
-        }
+        EdgeTable table = computed(progress -> new StudyRun().edgeTable(snapshot, progress));
+        results.write(settings.csv() ? out -> EdgeReport.csv(table, settings.units(), out)
+            : text(EdgeReport.text(table, options(settings, results, file))), List.of());
+        warn(settings, table.evidence());
         return ExitCode.DONE;
     }
 
@@ -106,23 +100,30 @@ final class Commands {
         ProfilePictures pictures = ProfilePictures.of(args, results);
         StudySnapshot snapshot = Studies.snapshot(file, settings);
         StationInfo station = profileStation(snapshot, args.value(Args.STATION), settings);
-        LateralProfile profile;
+        LateralProfile profile = computed(progress -> new StudyRun().profile(snapshot, station, progress));
+        results.write(settings.csv() ? out -> ProfileReport.csv(profile, settings.units(), out)
+            : text(ProfileReport.text(profile, options(settings, results, file))), pictures.draw(profile, settings));
+        warn(settings, profile.evidence());
+        return ExitCode.DONE;
+    }
+
+    /** The outcome of a computation, with its progress shown; what it cannot do is a matter of the arguments. */
+    private <T> T computed(Function<Progress, T> computation) {
         try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
-            profile = new StudyRun().profile(snapshot, station, progress);
+            return computation.apply(progress);
         } catch (StudyInputException refused) {
             throw CommandException.argument(refused.getMessage());
         }
-        StringBuilder out = new StringBuilder();
-        if (settings.csv()) {
-            ProfileReport.csv(profile, settings.units(), out);
-        } else {
-            out.append(ProfileReport.text(profile, options(settings, results, file)));
-        }
-        results.write(out.toString(), pictures.draw(profile, settings));
-        if (settings.csv()) {
-            warn(profile.evidence());
-        }
-        return ExitCode.DONE;
+    }
+
+    private static Consumer<Appendable> text(String text) {
+        return out -> {
+            try {
+                out.append(text);
+            } catch (IOException failure) {
+                throw new UncheckedIOException(failure);
+            }
+        };
     }
 
     private StationInfo profileStation(StudySnapshot snapshot, Optional<String> wanted, Settings settings) {
@@ -152,30 +153,20 @@ final class Commands {
         }
         StudySnapshot snapshot = Studies.snapshot(file, settings);
         PointTable table = compute(snapshot, points, name);
-        StringBuilder out = new StringBuilder();
-        if (settings.csv()) {
-            PointReport.csv(table, points.names(), settings.units(), out);
-        } else {
-            out.append(PointReport.text(table, points.names(), options(settings, results, file)));
-        }
-        results.write(out.toString(), List.of());
-        if (settings.csv()) {
-            warn(table.evidence());
-        }
+        results.write(settings.csv() ? out -> PointReport.csv(table, points.names(), settings.units(), out)
+            : text(PointReport.text(table, points.names(), options(settings, results, file))), List.of());
+        warn(settings, table.evidence());
         return ExitCode.DONE;
     }
 
     private PointTable compute(StudySnapshot snapshot, PointsFile points, String source) {
-        try (TerminalProgress progress = new TerminalProgress(terminal, cancellation)) {
-            return new StudyRun().points(snapshot, points.points(), progress);
-        } catch (StudyInputException refused) {
-            List<String> problems = new ArrayList<>();
-            refused.pointProblems().forEach(p -> problems.add(source + ", line " + points.lines().get(p.index()) + ": " + p.message()));
-            if (problems.isEmpty()) {
-                throw CommandException.argument(refused.getMessage());
-            }
+        StudyRun run = new StudyRun();
+        List<String> problems = run.problems(snapshot, points.points()).stream()
+            .map(p -> source + ", line " + points.lines().get(p.index()) + ": " + p.message()).toList();
+        if (!problems.isEmpty()) {
             throw new CommandException(ExitCode.FILE, PointsFile.shortened(problems));
         }
+        return computed(progress -> run.points(snapshot, points.points(), progress));
     }
 
     private byte[] standardInput() {
@@ -206,28 +197,12 @@ final class Commands {
     }
 
     /** CSV has no place for warnings: they go to standard error, so that they are not lost. */
-    private void warn(Evidence evidence) {
-        evidence.notices().stream().filter(notice -> notice.severity() == Notice.Severity.WARNING)
+    private void warn(Settings settings, Evidence evidence) {
+        evidence.notices().stream().filter(notice -> settings.csv() && notice.severity() == Notice.Severity.WARNING)
             .forEach(notice -> note("warning: " + notice.text()));
     }
 
     private void note(String text) {
         terminal.err().println("spanfield: " + text);
-    }
-
-    /** Bytes of something that writes to a stream. */
-    interface Writing {
-
-        void to(ByteArrayOutputStream out) throws IOException;
-    }
-
-    static byte[] bytes(Writing writing) {
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        try {
-            writing.to(out);
-        } catch (IOException failure) {
-            throw new CommandException(ExitCode.COMPUTATION, "the picture cannot be drawn: " + failure.getMessage());
-        }
-        return out.toByteArray();
     }
 }

@@ -114,7 +114,7 @@ public final class Main {
     }
 
     private static void print(Terminal terminal, String text) {
-        Results.print(terminal.out(), text.getBytes(Terminal.bytesCharset(terminal.charset())));
+        Results.print(terminal.out(), Content.of(text.getBytes(Terminal.bytesCharset(terminal.charset()))));
     }
 
     /** Messages for the user, each on a line of its own. */

@@ -1,9 +1,9 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.cli;
 
+import java.io.BufferedOutputStream;
 import java.io.IOException;
-import java.nio.ByteBuffer;
-import java.nio.channels.FileChannel;
+import java.io.OutputStream;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.FileSystemException;
@@ -11,7 +11,6 @@ import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
-import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.PosixFileAttributeView;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.util.ArrayList;
@@ -63,7 +62,7 @@ final class OutputFiles {
     }
 
     /** Writes the contents, in the order in which the files were announced. */
-    void write(List<byte[]> contents) {
+    void write(List<Content> contents) {
         try {
             for (int i = 0; i < targets.size(); i++) {
                 stage(targets.get(i), contents.get(i));
@@ -78,7 +77,7 @@ final class OutputFiles {
         }
     }
 
-    private void stage(Path target, byte[] content) throws IOException {
+    private void stage(Path target, Content content) throws IOException {
         // A link is followed, so that it stays a link.
         Path real = Files.exists(target) ? target.toRealPath() : target;
         targets.set(targets.indexOf(target), real);
@@ -87,11 +86,8 @@ final class OutputFiles {
             part = Files.createTempFile(real.getParent(), "." + real.getFileName(), ".part");
             parts.add(part);
         }
-        try (FileChannel channel = FileChannel.open(part, StandardOpenOption.WRITE)) {
-            ByteBuffer buffer = ByteBuffer.wrap(content);
-            while (buffer.hasRemaining()) {
-                channel.write(buffer);
-            }
+        try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(part))) {
+            content.to(out);
         }
         PosixFileAttributeView view = Files.getFileAttributeView(part, PosixFileAttributeView.class);
         if (view != null) {

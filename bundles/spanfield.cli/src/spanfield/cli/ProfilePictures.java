@@ -1,6 +1,8 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.cli;
 
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -46,6 +48,17 @@ record ProfilePictures(Optional<Path> svg, Optional<Path> png, int width) {
             + ProfilePlot.GREATEST_WIDTH_PIXELS);
     }
 
+    /** A picture is drawn whole before any file is written. */
+    private static byte[] drawn(Content picture) {
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        try {
+            picture.to(out);
+        } catch (IOException failure) {
+            throw new CommandException(ExitCode.COMPUTATION, "the picture cannot be drawn: " + failure.getMessage());
+        }
+        return out.toByteArray();
+    }
+
     /** The pictures as files, in the order in which they were announced. */
     List<byte[]> draw(LateralProfile profile, Settings settings) {
         List<byte[]> pictures = new ArrayList<>();
@@ -54,8 +67,8 @@ record ProfilePictures(Optional<Path> svg, Optional<Path> png, int width) {
         }
         try {
             ProfilePlot plot = new ProfilePlot(profile, new PlotOptions(settings.units(), settings.measure()));
-            svg.ifPresent(file -> pictures.add(Commands.bytes(plot::svg)));
-            png.ifPresent(file -> pictures.add(Commands.bytes(out -> plot.png(out, width))));
+            svg.ifPresent(file -> pictures.add(drawn(plot::svg)));
+            png.ifPresent(file -> pictures.add(drawn(out -> plot.png(out, width))));
         } catch (LinkageError | InternalError fonts) {
             // What the Java runtime throws where its font libraries, or any fonts at all, are missing.
             throw new CommandException(ExitCode.COMPUTATION, "the plot cannot be drawn, since Java finds no fonts; install fontconfig and a "

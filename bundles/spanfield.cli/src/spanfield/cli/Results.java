@@ -3,12 +3,12 @@ package spanfield.cli;
 
 import java.io.IOException;
 import java.io.OutputStream;
-import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import spanfield.report.TextStyle;
 
 /** Where the results of a verb go: standard output or a file, and files of plots. Everything is checked first and written last. */
@@ -19,7 +19,6 @@ final class Results {
     private final boolean csv;
     private final boolean toFile;
     private final OutputFiles files;
-    private final List<byte[]> contents = new ArrayList<>();
 
     /**
      * Checks where results shall go.
@@ -48,29 +47,25 @@ final class Results {
     }
 
     /** Writes the main result and the announced files, in this order. */
-    void write(String main, List<byte[]> others) {
+    void write(Consumer<Appendable> main, List<byte[]> others) {
+        List<Content> contents = new ArrayList<>();
         if (toFile) {
-            contents.add(main.getBytes(StandardCharsets.UTF_8));
+            contents.add(Content.of(main, StandardCharsets.UTF_8));
         }
-        contents.addAll(others);
+        others.forEach(bytes -> contents.add(Content.of(bytes)));
         if (!contents.isEmpty()) {
             cancellation.beforeHalt(files::discard);
             files.write(contents);
         }
         if (!toFile) {
-            print(main);
+            print(terminal.out(), Content.of(main, csv ? StandardCharsets.UTF_8 : Terminal.bytesCharset(terminal.charset())));
         }
     }
 
-    private void print(String main) {
-        Charset charset = csv ? StandardCharsets.UTF_8 : Terminal.bytesCharset(terminal.charset());
-        print(terminal.out(), main.getBytes(charset));
-    }
-
     /** Writes to standard output; a reader that has gone away, such as head, is no failure worth a word. */
-    static void print(OutputStream out, byte[] content) {
+    static void print(OutputStream out, Content content) {
         try {
-            out.write(content);
+            content.to(out);
             out.flush();
         } catch (IOException failure) {
             if (!String.valueOf(failure.getMessage()).contains("Broken pipe")) {
