@@ -96,8 +96,8 @@ final class LimitTable {
         }
         long above = all.stream().filter(c -> c.verdict() == Verdict.ABOVE).count();
         long undecided = all.stream().filter(c -> c.verdict() == Verdict.UNDECIDED).count();
-        String counts = above == 0 && undecided == 0 ? "all " + all.size() + " compared values lie below"
-            : above + " of " + all.size() + " compared values lie ABOVE" + (undecided == 0 ? "" : ", " + undecided + " are undecided");
+        String counts = above == 0 && undecided == 0 ? "all " + all.size() + " compared values lie below their limits"
+            : above + " of " + all.size() + " compared values lie ABOVE their limits" + (undecided == 0 ? "" : ", " + undecided + " undecided");
         LimitComparison worst = all.stream().max(Comparator.comparingDouble(LimitComparison::fractionOfLevel)).orElseThrow();
         EdgeRow row = rows.stream().filter(r -> r.comparisons().stream().anyMatch(c -> c == worst)).findFirst().orElseThrow();
         return counts + "; highest: " + Numbers.significant(100 * worst.fractionOfLevel(), PERCENT_DIGITS) + " % of '" + worst.limit().name()

@@ -146,9 +146,9 @@ class EdgeReportTest {
     @Test
     void text_saysHowTheComparisonsWent() {
         String all = EdgeReport.text(ResultFixtures.edgeTable(EDGE_LIMIT), options(Units.SI, FieldMeasure.RESULTANT));
-        assertTrue(all.contains("all 6 compared values lie below"), all);
+        assertTrue(all.contains("all 6 compared values lie below their limits"), all);
         String some = EdgeReport.text(ResultFixtures.edgeTable(EDGE_LIMIT, MAJOR_LIMIT), options(Units.SI, FieldMeasure.RESULTANT));
-        assertTrue(some.contains("3 of 9 compared values lie ABOVE"), some);
+        assertTrue(some.contains("3 of 9 compared values lie ABOVE their limits"), some);
         String none = EdgeReport.text(ResultFixtures.edgeTable(), options(Units.SI, FieldMeasure.RESULTANT));
         assertTrue(none.contains("No limit of the study applies here."), none);
     }
@@ -161,7 +161,7 @@ class EdgeReportTest {
             spanfield.model.LimitBasis.USER);
         String text = EdgeReport.text(ResultFixtures.edgeTable(limit), options(Units.SI, FieldMeasure.RESULTANT));
         assertEquals("undecided", Tables.aligned(text, "Margin (limit less value)").get(0).get(6));
-        assertTrue(text.contains("0 of 6 compared values lie ABOVE, 1 are undecided"), text);
+        assertTrue(text.contains("0 of 6 compared values lie ABOVE their limits, 1 undecided"), text);
     }
 
     @Test
