@@ -33,6 +33,15 @@ public final class StudyIds {
         });
     }
 
+    /** Gives an element that is about to join a study an identifier that is unique there, unless it has one. */
+    public static void assign(NamedElement element, Study study) {
+        if (element.getId() == null || element.getId().isBlank()) {
+            Set<String> used = new HashSet<>();
+            forEach(study, other -> used.add(String.valueOf(other.getId())));
+            element.setId(unique(element, used));
+        }
+    }
+
     /** An identifier that is used twice, or null. */
     static String duplicate(Study study) {
         Map<String, NamedElement> seen = new HashMap<>();
