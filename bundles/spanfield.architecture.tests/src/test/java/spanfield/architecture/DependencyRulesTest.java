@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.tngtech.archunit.core.domain.JavaClasses;
+import com.tngtech.archunit.core.domain.JavaModifier;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.lang.ArchRule;
 import java.io.IOException;
@@ -55,7 +56,8 @@ class DependencyRulesTest {
 
     @Test
     void solver_hasNoStaticStateThatChanges() {
-        fields().that().areStatic().should().beFinal().check(classes("spanfield.solver"));
+        // the compiler's own tables for switches over enums are left out
+        fields().that().areStatic().and().doNotHaveModifier(JavaModifier.SYNTHETIC).should().beFinal().check(classes("spanfield.solver"));
     }
 
     @Test

@@ -24,7 +24,7 @@ class SourceRulesTest {
 
     private static List<Path> files(String... endings) throws IOException {
         try (Stream<Path> all = Files.walk(ROOT)) {
-            return all.filter(Files::isRegularFile)
+            return all.filter(Files::isRegularFile).filter(path -> !path.getFileName().toString().startsWith("."))
                 .filter(path -> { for (Path part : ROOT.relativize(path)) { if (SKIPPED.contains(part.toString())) { return false; } } return true; })
                 .filter(path -> { for (String ending : endings) { if (path.toString().endsWith(ending)) { return true; } } return false; })
                 .toList();
