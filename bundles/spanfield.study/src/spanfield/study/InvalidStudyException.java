@@ -3,6 +3,7 @@ package spanfield.study;
 
 import java.util.List;
 import spanfield.model.validation.Finding;
+import spanfield.study.internal.Messages;
 
 /** A study with errors, of which nothing is computed. Carries everything that the checks found. */
 public final class InvalidStudyException extends RuntimeException {
@@ -19,8 +20,9 @@ public final class InvalidStudyException extends RuntimeException {
 
     private static String message(List<Finding> findings) {
         List<Finding> errors = findings.stream().filter(Finding::isError).toList();
-        String first = errors.get(0).place() + ": " + errors.get(0).message();
-        return errors.size() == 1 ? "The study has an error. " + first : "The study has " + errors.size() + " errors. The first: " + first;
+        Finding first = errors.get(0);
+        return errors.size() == 1 ? Messages.text("invalid.one", first.place(), first.message())
+            : Messages.text("invalid", errors.size(), first.place(), first.message());
     }
 
     /** All findings, errors first. */

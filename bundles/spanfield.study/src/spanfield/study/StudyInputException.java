@@ -2,6 +2,7 @@
 package spanfield.study;
 
 import java.util.List;
+import spanfield.study.internal.Messages;
 
 /** A request to a study that cannot be met: an unknown name, a point in a conductor or under ground. The study itself is sound. */
 public final class StudyInputException extends RuntimeException {
@@ -26,7 +27,7 @@ public final class StudyInputException extends RuntimeException {
 
     /** For a request with unusable points, at least one. */
     public StudyInputException(List<PointProblem> problems) {
-        super(problems.size() == 1 ? problems.get(0).message() : problems.get(0).message() + " (and " + (problems.size() - 1) + " more points)");
+        super(problems.size() == 1 ? problems.get(0).message() : Messages.text("points.more", problems.get(0).message(), problems.size() - 1));
         this.pointProblems = List.copyOf(problems);
     }
 

@@ -17,6 +17,7 @@ import spanfield.model.validation.Severity;
 import spanfield.solver.earth.EarthModel;
 import spanfield.solver.field.Accuracy;
 import spanfield.solver.geometry.Wire;
+import spanfield.study.internal.Messages;
 import spanfield.study.internal.PreparedStudy;
 import spanfield.study.internal.StudyAssembly;
 import spanfield.study.internal.StudyData.CaseData;
@@ -145,18 +146,16 @@ public final class StudySnapshot {
      * @param caseId identifier of the load case
      */
     public List<Wire> wires(String caseId) {
-        return prepared.wires(find(prepared.data().cases(), c -> c.info().id(), caseId, "load case"));
+        return prepared.wires(find(prepared.data().cases(), c -> c.info().id(), caseId, Messages.text("request.loadCase")));
     }
 
     /** The same study at another accuracy, dimensionless, {@link Accuracy#FINEST} to {@link Accuracy#COARSEST}. */
     public StudySnapshot withAccuracy(double relative) {
         if (!(relative >= Accuracy.FINEST && relative <= Accuracy.COARSEST)) {
-            throw new StudyInputException("The relative accuracy is " + relative + "; give a number from " + Accuracy.FINEST + " to "
-                + Accuracy.COARSEST + ".");
+            throw new StudyInputException(Messages.text("request.accuracy", relative, Accuracy.FINEST, Accuracy.COARSEST));
         }
         return changed(relative, earthModel(), prepared.data().cases(), prepared.data().stations(),
-            relative == relativeAccuracy() ? null : "The accuracy was asked as " + relative + " on request; the study states "
-                + relativeAccuracy() + ".");
+            relative == relativeAccuracy() ? null : Messages.text("change.accuracy", relative, relativeAccuracy()));
     }
 
     /**
@@ -166,7 +165,7 @@ public final class StudySnapshot {
      */
     public StudySnapshot withEarthModel(EarthModel model) {
         return new StudySnapshot(StudyRunner.withEarthModel(prepared, model),
-            identity(model == earthModel() ? null : "The earth model was chosen on request; the study states another."));
+            identity(model == earthModel() ? null : Messages.text("change.earthModel")));
     }
 
     /**
@@ -175,9 +174,9 @@ public final class StudySnapshot {
      * @param ids identifiers, at least one
      */
     public StudySnapshot withCases(Collection<String> ids) {
-        ids.forEach(id -> find(prepared.data().cases(), c -> c.info().id(), id, "load case"));
+        ids.forEach(id -> find(prepared.data().cases(), c -> c.info().id(), id, Messages.text("request.loadCase")));
         List<CaseData> chosen = prepared.data().cases().stream().filter(c -> ids.contains(c.info().id())).toList();
-        requireSome(chosen, "load case");
+        requireSome(chosen, Messages.text("request.loadCase"));
         return changed(relativeAccuracy(), earthModel(), chosen, prepared.data().stations(), null);
     }
 
@@ -187,21 +186,21 @@ public final class StudySnapshot {
      * @param ids identifiers, at least one
      */
     public StudySnapshot withStations(Collection<String> ids) {
-        ids.forEach(id -> find(prepared.data().stations(), s -> s.info().id(), id, "station"));
+        ids.forEach(id -> find(prepared.data().stations(), s -> s.info().id(), id, Messages.text("request.station")));
         List<StationData> chosen = prepared.data().stations().stream().filter(s -> ids.contains(s.info().id())).toList();
-        requireSome(chosen, "station");
+        requireSome(chosen, Messages.text("request.station"));
         return changed(relativeAccuracy(), earthModel(), prepared.data().cases(), chosen, null);
     }
 
     private static void requireSome(List<?> chosen, String what) {
         if (chosen.isEmpty()) {
-            throw new StudyInputException("No " + what + " was chosen; name at least one.");
+            throw new StudyInputException(Messages.text("request.none", what));
         }
     }
 
     private static <T> T find(List<T> all, Function<T, String> id, String wanted, String what) {
         return all.stream().filter(t -> id.apply(t).equals(wanted)).findFirst().orElseThrow(() -> new StudyInputException(
-            "The study has no " + what + " '" + wanted + "'; it has " + all.stream().map(id).collect(Collectors.joining(", ")) + "."));
+            Messages.text("request.unknown", what, wanted, all.stream().map(id).collect(Collectors.joining(", ")))));
     }
 
     private StudySnapshot changed(double accuracy, EarthModel model, List<CaseData> cases, List<StationData> stations, String change) {

@@ -36,11 +36,6 @@ final class EvidenceWriter {
     /** Residual current worth a notice where the earth is left out, as a part of the greatest phase current. */
     private static final double NOTABLE_RESIDUAL = 1e-3;
 
-    private static final List<String> CAUTIONS = List.of(
-        "These are computed values for planning and screening; measurements and local conditions may differ by some per cent and more.",
-        "Local codes and licensed practice decide which limits, loads and clearances hold; this result does not replace them.",
-        "Live lines can kill: keep the safe approach distances, and leave work on or near lines to qualified people.");
-
     private final PreparedStudy study;
     private final StudyData data;
     private final StudyIdentity identity;
@@ -61,12 +56,12 @@ final class EvidenceWriter {
         List<CurrentTable> currents = currents();
         List<Notice> notices = notices(lowest);
         if (worstRatio > data.relativeAccuracy()) {
-            notices.add(Notice.warning("The numerical error bound reaches " + Texts.number(worstRatio) + " of the resultant, where "
-                + Texts.number(data.relativeAccuracy()) + " was asked: double precision allows no better where the phases cancel so far."));
+            notices.add(Notice.warning(Messages.text("notice.accuracyNotReached", worstRatio, data.relativeAccuracy())));
         }
         return new Evidence(SoftwareVersion.VERSION, data.id(), data.name(), identity.digest(), data.frequencyHertz(), data.earthModel(),
             data.resistivity(), study.earthPlane(), data.impedanceFormula(), data.referenceHeight(), data.relativeAccuracy(), worstRatio,
-            resolution, methods(!Double.isNaN(resolution)), currents, geometry, notices, CAUTIONS);
+            resolution, methods(!Double.isNaN(resolution)), currents, geometry, notices,
+            List.of(Messages.text("caution.computed"), Messages.text("caution.codes"), Messages.text("caution.live")));
     }
 
     private List<CurrentTable> currents() {
@@ -77,50 +72,34 @@ final class EvidenceWriter {
 
     private List<MethodNote> methods(boolean maxima) {
         List<MethodNote> notes = new ArrayList<>();
-        notes.add(new MethodNote("Wires", "Every span hangs as an exact catenary between its attachments; wind turns it about its chord by the "
-            + "swing angle, insulator strings stay vertical. Beyond the first and last structure wires go on straight and level. "
-            + "Subconductors are separate wires that share the current evenly.", "catenary: any text on the mechanics of overhead lines"));
-        notes.add(new MethodNote("Field", "Biot-Savart law along the true path of every wire by graded Gauss-Legendre quadrature, endless tails in "
-            + "closed form; the field of each wire per ampere first, then load cases as sums of phasors.", "Biot-Savart law"));
+        notes.add(note("method.wires"));
+        notes.add(note("method.field"));
         notes.add(earthNote());
-        notes.add(new MethodNote("Measures", "Resultant: root of the sum of the squared RMS components. Major axis: major semi-axis of the "
-            + "field ellipse.", "IEEE Std 644; IEC 61786-1"));
+        notes.add(note("method.measures"));
         if (inductionUsed()) {
-            notes.add(shieldNote());
+            boolean carson = data.impedanceFormula() == ImpedanceFormula.CARSON;
+            notes.add(note(carson ? "method.shields.carson" : "method.shields.complexDepth", resistances()));
         }
         if (uses(StringingRule.Kind.TENSION)) {
-            notes.add(new MethodNote("Tension", "Catenary constant = horizontal tension over mass per length times 9.80665 m/s2.",
-                "standard acceleration of free fall, CGPM 1901"));
+            notes.add(note("method.tension"));
         }
         if (maxima) {
-            notes.add(new MethodNote("Greatest values", "Found between the points of the profile by successive division, to an offset of "
-                + Texts.number(MaximumSearch.RESOLUTION_METRES) + " m.", "numerical search"));
+            notes.add(note("method.maxima", MaximumSearch.RESOLUTION_METRES));
         }
-        notes.add(new MethodNote("Errors", "The numerical error is a bound from the quadrature and rounding. The model error is the difference of the "
-            + "value between the two earth models; it leaves out what both neglect: layered earth, footing resistances, steel structures.",
-            "own estimate"));
+        notes.add(note("method.errors"));
         return notes;
+    }
+
+    private static MethodNote note(String key, Object... arguments) {
+        return new MethodNote(Messages.text(key + ".topic"), Messages.text(key, arguments), Messages.text(key + ".source"));
     }
 
     private MethodNote earthNote() {
         return switch (data.earthModel()) {
-            case EXACT_HALF_SPACE -> new MethodNote("Earth", "Homogeneous half-space of " + Texts.number(data.resistivity())
-                + " ohm m: complex image of the true path, corrected by the exact integral less the complex image of each wire's mean straight line.",
-                "Carson, Bell System Technical Journal 5, 1926; Wait, 1961; Deri, Tevan, Semlyen, Castanheira, IEEE Trans. PAS-100, 1981");
-            case COMPLEX_IMAGES -> new MethodNote("Earth", "Image of every wire in the complex depth of an earth of "
-                + Texts.number(data.resistivity()) + " ohm m, an approximation whose deviation from the exact half-space is the model error.",
-                "Deri, Tevan, Semlyen, Castanheira, IEEE Trans. PAS-100 no. 8, 1981");
-            case NONE -> new MethodNote("Earth", data.frequencyHertz() == 0 ? "None: direct current."
-                : "None: the field of the wires in free space.", "Biot-Savart law");
+            case EXACT_HALF_SPACE -> note("method.earth.exact", data.resistivity());
+            case COMPLEX_IMAGES -> note("method.earth.images", data.resistivity());
+            case NONE -> note(data.frequencyHertz() == 0 ? "method.earth.directCurrent" : "method.earth.none");
         };
-    }
-
-    private MethodNote shieldNote() {
-        boolean carson = data.impedanceFormula() == ImpedanceFormula.CARSON;
-        return new MethodNote("Shield wires", "Bonded shield wires carry I_s = -Z_ss^-1 Z_sp I_p, with series impedances per metre of parallel wires "
-            + "at their mean heights and offsets, for a long line bonded at every structure; footing resistances and line ends are left out. "
-            + "Resistances: " + resistances() + ".", carson ? "Carson, Bell System Technical Journal 5, 1926"
-            : "Deri, Tevan, Semlyen, Castanheira, IEEE Trans. PAS-100 no. 8, 1981");
     }
 
     private String resistances() {
@@ -129,8 +108,7 @@ final class EvidenceWriter {
             for (ElementData element : line.elements()) {
                 if (element.bonding() == BondingData.BONDED) {
                     ConductorData c = element.conductor();
-                    texts.add(c.name() + " " + Texts.number(1000 * c.resistance()) + " ohm/km at " + Texts.number(c.resistanceTemperature())
-                        + " degrees C");
+                    texts.add(Messages.text("resistance", c.name(), 1000 * c.resistance(), c.resistanceTemperature()));
                 }
             }
         }
@@ -164,18 +142,17 @@ final class EvidenceWriter {
         addEarthNotices(notices, lowest);
         addCouplingNotices(notices);
         if (data.electricLimits() > 0) {
-            notices.add(Notice.information(data.electricLimits() == 1 ? "One limit for the electric field was not compared."
-                : data.electricLimits() + " limits for the electric field were not compared."));
+            notices.add(Notice.information(data.electricLimits() == 1 ? Messages.text("notice.electricLimits.one")
+                : Messages.text("notice.electricLimits", data.electricLimits())));
         }
         return notices;
     }
 
     private void addEarthNotices(List<Notice> notices, double lowest) {
         if (data.frequencyHertz() == 0) {
-            notices.add(Notice.information("Direct current: the static field of the earth itself is not included, nothing is induced in shield "
-                + "wires, and the field of current that returns in the earth is left out. There is no model error to estimate."));
+            notices.add(Notice.information(Messages.text("notice.directCurrent")));
         } else if (data.earthModel() == EarthModel.NONE) {
-            notices.add(Notice.information("No earth model is active, so that no model error can be estimated."));
+            notices.add(Notice.information(Messages.text("notice.noEarth")));
             addResidualNotice(notices);
         } else {
             addPlaneNotices(notices, lowest);
@@ -188,9 +165,8 @@ final class EvidenceWriter {
                 .orElse(0);
             for (CurrentSplit split : table.splits()) {
                 if (split.earth().magnitude() > NOTABLE_RESIDUAL * greatest) {
-                    notices.add(Notice.warning("Load case '" + table.loadCase().name() + "': " + Texts.number(split.earth().magnitude())
-                        + " A return outside the wires of " + String.join(", ", split.lines())
-                        + ". Without an earth model the field of that return is missing, and values far from the line are too high or too low."));
+                    notices.add(Notice.warning(Messages.text("notice.residual", table.loadCase().name(), split.earth().magnitude(),
+                        String.join(", ", split.lines()))));
                 }
             }
         }
@@ -206,17 +182,14 @@ final class EvidenceWriter {
             }
         }
         if (lowest + least - 2 * study.earthPlane() < LEAST_HEIGHT_SUM_METRES) {
-            notices.add(Notice.warning("Some field points lie so far below the earth plane at " + Texts.number(study.earthPlane())
-                + " m, the mean ground level under the lines, that the earth's part of the field is taken at a substitute height there."));
+            notices.add(Notice.warning(Messages.text("notice.belowPlane", study.earthPlane())));
         }
         boolean ends = data.lines().stream().anyMatch(l -> l.start() == WireEnd.ENDS || l.finish() == WireEnd.ENDS);
         if (data.earthModel() == EarthModel.EXACT_HALF_SPACE && ends) {
-            notices.add(Notice.information("The exact half-space correction takes wires that end as endless ones; complex images end with them. "
-                + "Compare with complex images near and beyond a dead end."));
+            notices.add(Notice.information(Messages.text("notice.deadEnd")));
         }
         if (data.earthModel() == EarthModel.EXACT_HALF_SPACE && turn > NOTABLE_TURN_DEGREES) {
-            notices.add(Notice.information("Wires turn by up to " + Texts.number(turn) + " degrees from their mean direction: the exact half-space "
-                + "correction is taken along the mean direction, the complex image along the true path."));
+            notices.add(Notice.information(Messages.text("notice.turns", turn)));
         }
     }
 
@@ -227,9 +200,8 @@ final class EvidenceWriter {
         for (Uncoupled pair : study.groups().uncoupled()) {
             boolean matters = data.lines().stream().anyMatch(l -> bonded(l) && (l.name().equals(pair.first()) || l.name().equals(pair.second())));
             if (matters) {
-                notices.add(Notice.information("Lines '" + pair.first() + "' and '" + pair.second() + "' run at "
-                    + Texts.number(pair.angleDegrees()) + " degrees to each other and are not coupled in the induced shield-wire currents: "
-                    + "only lines within " + Texts.number(ParallelGroups.GREATEST_ANGLE_DEGREES) + " degrees are."));
+                notices.add(Notice.information(Messages.text("notice.uncoupled", pair.first(), pair.second(), pair.angleDegrees(),
+                    ParallelGroups.GREATEST_ANGLE_DEGREES)));
             }
         }
     }

@@ -68,22 +68,19 @@ final class FieldComputer {
         int[] pending = indices(points.length);
         for (int round = 0; round <= ROUNDS && pending.length > 0; round++) {
             evaluate(state, fields, points, pending, relative, progress);
-            double worst = 0;
-            List<Integer> rest = new ArrayList<>();
-            for (int point : pending) {
-                double ratio = fields.stream().mapToDouble(f -> ratio(f.values[point])).max().orElse(0);
-                if (ratio > asked) {
-                    rest.add(point);
-                    worst = Math.max(worst, Math.min(ratio, 1));
-                }
-            }
             if (relative <= Accuracy.FINEST) {
                 break;
             }
-            relative = Math.max(Accuracy.FINEST, relative * AIM * asked / Math.max(worst, asked));
-            pending = rest.stream().mapToInt(Integer::intValue).toArray();
+            pending = Arrays.stream(pending).filter(point -> ratio(fields, point) > asked).toArray();
+            double worst = Arrays.stream(pending).mapToDouble(point -> Math.min(ratio(fields, point), 1)).max().orElse(asked);
+            relative = Math.max(Accuracy.FINEST, relative * AIM * asked / worst);
         }
         return fields;
+    }
+
+    /** Greatest ratio of the load cases at a point. */
+    private static double ratio(List<CaseField> fields, int point) {
+        return fields.stream().mapToDouble(f -> ratio(f.values[point])).max().orElse(0);
     }
 
     private static int[] indices(int count) {

@@ -75,7 +75,7 @@ public final class GeometryChecks {
     }
 
     private static String wind(GeometryState state) {
-        return state.swing() == 0 ? "" : " with a wind swing of " + Texts.number(Math.toDegrees(state.swing())) + " degrees";
+        return state.swing() == 0 ? "" : Messages.text("wind", Math.toDegrees(state.swing()));
     }
 
     /** Span_WiresAboveGround and Span_ClearanceUsual. */
@@ -91,16 +91,15 @@ public final class GeometryChecks {
     private void judgeClearance(GeometryState state, StrungConductor conductor, int span, GroundClearance least) {
         ElementData element = conductor.element();
         double usual = USUAL_CLEARANCE_METRES + CLEARANCE_PER_VOLT * element.nominalVoltage();
-        String place = conductor.spanName(span) + ", " + Texts.number(least.distance()) + " m from '"
-            + conductor.line().structures().get(span).name() + "'" + wind(state);
+        String place = Messages.text("spanPlace", conductor.spanName(span), least.distance(), conductor.line().structures().get(span).name(),
+            wind(state));
         if (least.metres() <= element.conductor().radius()) {
-            report(GeometryRule.SPAN_WIRES_ABOVE_GROUND, element.key(), conductor.name() + span, "The " + conductor.name()
-                + (least.metres() < 0 ? " goes " + Texts.number(-least.metres()) + " m below the ground " : " touches the ground ") + place
-                + ". String it more tightly, or correct the heights or the ground.");
+            report(GeometryRule.SPAN_WIRES_ABOVE_GROUND, element.key(), conductor.name() + span, least.metres() < 0
+                ? Messages.text("Span_WiresAboveGround", conductor.name(), -least.metres(), place)
+                : Messages.text("Span_WiresAboveGround.touches", conductor.name(), place));
         } else if (!element.shield() && least.metres() < usual) {
-            report(GeometryRule.SPAN_CLEARANCE_USUAL, element.key(), conductor.name() + span, "The " + conductor.name() + " comes as near as "
-                + Texts.number(least.metres()) + " m to the ground " + place + "; " + Texts.number(usual)
-                + " m is usual for its voltage. If that is not meant, check sag and heights; local codes decide.");
+            report(GeometryRule.SPAN_CLEARANCE_USUAL, element.key(), conductor.name() + span,
+                Messages.text("Span_ClearanceUsual", conductor.name(), least.metres(), place, usual));
         }
     }
 
@@ -113,15 +112,12 @@ public final class GeometryChecks {
             StrungConductor second = all.get(pair.second());
             double gap = pair.metres() - radii(first, second);
             String subject = first.element().key() + first.name() + second.element().key() + second.name();
-            String who = "The " + first.name() + " and " + second.name();
             String where = first.spanName(pair.firstSpan()) + wind(state);
             if (gap <= 0) {
-                report(GeometryRule.WIRES_APART, first.element().key(), subject, who + " run into each other " + where
-                    + ". Correct attachments, sags or the crossing.");
+                report(GeometryRule.WIRES_APART, first.element().key(), subject, Messages.text("Wires_Apart", first.name(), second.name(), where));
             } else {
-                report(GeometryRule.WIRES_DISTANCE_USUAL, first.element().key(), subject, who + " come as near as " + Texts.number(gap)
-                    + " m to each other " + where + "; " + Texts.number(usualDistance(first, second))
-                    + " m is usual for their voltage. If that is not meant, check attachments and sags.");
+                report(GeometryRule.WIRES_DISTANCE_USUAL, first.element().key(), subject,
+                    Messages.text("Wires_DistanceUsual", first.name(), second.name(), gap, where, usualDistance(first, second)));
             }
         }
     }
@@ -144,9 +140,8 @@ public final class GeometryChecks {
             for (int i = 0; i < grid.size(); i++) {
                 Wire wire = inside.wireAt(grid.position(i));
                 if (wire != null) {
-                    report(GeometryRule.STATION_POINTS_OUTSIDE_WIRES, station.key(), "", "At station '" + station.info().name()
-                        + "' the profile point at offset " + Texts.number(grid.offset(i)) + " m lies in " + wire.name() + wind(state)
-                        + ". Choose another reference height, station or spacing.");
+                    report(GeometryRule.STATION_POINTS_OUTSIDE_WIRES, station.key(), "",
+                        Messages.text("Station_PointsOutsideWires", station.info().name(), grid.offset(i), wire.name(), wind(state)));
                     break;
                 }
             }
@@ -163,9 +158,8 @@ public final class GeometryChecks {
             StrungConductor conductor = state.conductors().get(owner[i]);
             double height = state.wires().get(i).path().meanElevationMetres() - geometry.earthPlane();
             if (!(height > LEAST_MEAN_HEIGHT_METRES)) {
-                report(GeometryRule.STUDY_EARTH_PLANE_BELOW_WIRES, conductor.line().key(), "", "The wires of line '" + conductor.line().name()
-                    + "' hang on average " + Texts.number(-height) + " m below the earth plane of the study at " + Texts.number(geometry.earthPlane())
-                    + " m, the mean ground level under all lines. Study lines at so different levels apart, or leave out the earth resistivity.");
+                report(GeometryRule.STUDY_EARTH_PLANE_BELOW_WIRES, conductor.line().key(), "",
+                    Messages.text("Study_EarthPlaneBelowWires", conductor.line().name(), -height, geometry.earthPlane()));
             }
         }
     }
@@ -181,9 +175,8 @@ public final class GeometryChecks {
         }
         double sum = imageHeightSum(data, geometry.earthPlane(), state, lowest);
         if (!(sum > 0)) {
-            report(GeometryRule.STUDY_EARTH_IMAGE_DEFINED, "study", "", "The lowest profile point, at an elevation of " + Texts.number(lowest)
-                + " m, lies so far below the earth plane at " + Texts.number(geometry.earthPlane())
-                + " m that no complex image exists for it. Choose another station, no earth model, or a smaller corridor.");
+            report(GeometryRule.STUDY_EARTH_IMAGE_DEFINED, "study", "",
+                Messages.text("Study_EarthImageDefined", lowest, geometry.earthPlane()));
         }
     }
 
@@ -203,9 +196,9 @@ public final class GeometryChecks {
     private void currentPathClosed(LineData line) {
         if (line.start() == WireEnd.ENDS || line.finish() == WireEnd.ENDS) {
             boolean both = line.start() == WireEnd.ENDS && line.finish() == WireEnd.ENDS;
-            String where = both ? "at both ends" : line.start() == WireEnd.ENDS ? "at its first structure" : "at its last structure";
-            report(GeometryRule.LINE_CURRENT_PATH_CLOSED, line.key(), "", "The wires of line '" + line.name() + "' end " + where
-                + ". The current path is open there, and the field of an open path is not unique: trust results only well away from the end.");
+            String where = both ? Messages.text("Line_CurrentPathClosed.both")
+                : line.start() == WireEnd.ENDS ? Messages.text("Line_CurrentPathClosed.first") : Messages.text("Line_CurrentPathClosed.last");
+            report(GeometryRule.LINE_CURRENT_PATH_CLOSED, line.key(), "", Messages.text("Line_CurrentPathClosed", line.name(), where));
         }
     }
 }

@@ -81,8 +81,7 @@ final class LineBuilder {
             if (!(turn <= GREATEST_TURN_DEGREES)) {
                 StructureData structure = line.structures().get(i);
                 problems.add(new GeometryProblem(GeometryRule.STRUCTURE_TURN_NOT_FOLDING_BACK, structure.key(),
-                    "Line '" + line.name() + "' turns by " + Texts.number(turn) + " degrees at structure '" + structure.name()
-                        + "' and runs back along itself. Put the structures in the order of the line, or split the line there."));
+                    Messages.text("Structure_TurnNotFoldingBack", line.name(), turn, structure.name())));
             }
         }
     }
@@ -117,9 +116,7 @@ final class LineBuilder {
                 double[] given = {Math.cos(structure.turn()), -Math.sin(structure.turn())};
                 if (!(given[0] * rights[i][0] + given[1] * rights[i][1] > 0)) {
                     problems.add(new GeometryProblem(GeometryRule.STRUCTURE_FACES_ALONG_LINE, structure.key(),
-                        "Structure '" + structure.name() + "' of line '" + line.name() + "' faces "
-                            + Texts.number(Math.toDegrees(structure.turn())) + " degrees, against or across the direction of its line, so that "
-                            + "right and left attachments change sides. Correct the turn, or leave it out to follow the line."));
+                        Messages.text("Structure_FacesAlongLine", structure.name(), line.name(), Math.toDegrees(structure.turn()))));
                 }
                 rights[i] = given;
             }
@@ -139,8 +136,7 @@ final class LineBuilder {
             if (!(height > 0)) {
                 StructureData structure = line.structures().get(i);
                 problems.add(new GeometryProblem(GeometryRule.STRUCTURE_WIRES_ABOVE_GROUND, structure.key(),
-                    "At structure '" + structure.name() + "' of line '" + line.name() + "' a wire of '" + element.name() + "' hangs "
-                        + Texts.number(-height) + " m below the ground. Correct the base elevation, the height of the attachment, or the ground."));
+                    Messages.text("Structure_WiresAboveGround", structure.name(), line.name(), element.name(), -height)));
             }
         }
     }

@@ -53,6 +53,10 @@ final class MaximumSearch {
             this.to = to;
         }
 
+        boolean holds(double offset) {
+            return offset >= from && offset <= to;
+        }
+
         double value(FieldValue field) {
             return field.tesla(measure);
         }
@@ -67,10 +71,9 @@ final class MaximumSearch {
         this.station = station;
     }
 
-    /** Asks for a maximum; the answer has the returned number. */
-    int want(int loadCase, FieldMeasure measure, double from, double to) {
+    /** Asks for a maximum within a range of offsets; answers come in the order of the questions. */
+    void want(int loadCase, FieldMeasure measure, double from, double to) {
         searches.add(new Search(loadCase, measure, from, to));
-        return searches.size() - 1;
     }
 
     /**
@@ -109,22 +112,19 @@ final class MaximumSearch {
     /** Takes the greatest value of the points into account and brackets the candidates anew. */
     private static void narrow(Search search, double[] offsets, List<CaseField> fields) {
         FieldValue[] values = fields.get(search.loadCase).values();
-        List<double[]> old = List.copyOf(search.brackets);
         boolean first = search.best == null;
         for (int i = 0; i < offsets.length; i++) {
-            if (offsets[i] >= search.from && offsets[i] <= search.to
-                && (search.best == null || search.value(values[i]) > search.value(search.best.field()))) {
+            if (search.holds(offsets[i]) && (search.best == null || search.value(values[i]) > search.value(search.best.field()))) {
                 search.best = new PlacedField(offsets[i], values[i]);
             }
         }
+        double threshold = Math.max(Double.MIN_VALUE, CANDIDATE_PART * search.value(search.best.field()));
+        List<double[]> old = List.copyOf(search.brackets);
         search.brackets.clear();
-        double threshold = CANDIDATE_PART * search.value(search.best.field());
         for (int i = 0; i < offsets.length; i++) {
-            boolean inside = offsets[i] >= search.from && offsets[i] <= search.to;
-            if (inside && search.value(values[i]) >= threshold && search.value(values[i]) > 0 && (first || within(old, offsets[i]))
-                && peak(search, offsets, values, i)) {
-                double low = i > 0 && offsets[i - 1] >= search.from ? offsets[i - 1] : offsets[i];
-                double high = i + 1 < offsets.length && offsets[i + 1] <= search.to ? offsets[i + 1] : offsets[i];
+            if (search.value(values[i]) >= threshold && (first || within(old, offsets[i])) && peak(search, offsets, values, i)) {
+                double low = i > 0 && search.holds(offsets[i - 1]) ? offsets[i - 1] : offsets[i];
+                double high = i + 1 < offsets.length && search.holds(offsets[i + 1]) ? offsets[i + 1] : offsets[i];
                 search.brackets.add(new double[] {low, offsets[i], high});
             }
         }
@@ -134,11 +134,11 @@ final class MaximumSearch {
         return brackets.stream().anyMatch(b -> offset >= b[0] && offset <= b[2]);
     }
 
-    /** Whether neither neighbour within the range is greater. */
+    /** Whether a point lies within the range and no neighbour within it is greater. */
     private static boolean peak(Search search, double[] offsets, FieldValue[] values, int i) {
         double value = search.value(values[i]);
-        boolean leftLower = i == 0 || offsets[i - 1] < search.from || search.value(values[i - 1]) <= value;
-        boolean rightLower = i + 1 == offsets.length || offsets[i + 1] > search.to || search.value(values[i + 1]) <= value;
-        return leftLower && rightLower;
+        boolean leftLower = i == 0 || !search.holds(offsets[i - 1]) || search.value(values[i - 1]) <= value;
+        boolean rightLower = i + 1 == offsets.length || !search.holds(offsets[i + 1]) || search.value(values[i + 1]) <= value;
+        return search.holds(offsets[i]) && leftLower && rightLower;
     }
 }

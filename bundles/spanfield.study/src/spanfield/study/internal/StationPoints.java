@@ -47,7 +47,15 @@ final class StationPoints {
         double first = all.first();
         double last = all.last();
         Arrays.stream(plan.groundCorners()).filter(o -> o > first && o < last).forEach(o -> add(all, o));
-        double step = Math.max(LEAST_STEP_METRES, STEP_PER_DISTANCE * DISTANCE_PER_CLEARANCE * clearance);
+        divide(all, Math.max(LEAST_STEP_METRES, STEP_PER_DISTANCE * DISTANCE_PER_CLEARANCE * clearance));
+        offsets = all.stream().mapToDouble(Double::doubleValue).toArray();
+        profile = Arrays.stream(asked).mapToInt(this::indexOf).toArray();
+        left = indexOf(edges.leftOffsetMetres());
+        right = indexOf(edges.rightOffsetMetres());
+    }
+
+    /** Divides every interval that is wider than a step. */
+    private static void divide(TreeSet<Double> all, double step) {
         Double before = null;
         for (double offset : all.toArray(Double[]::new)) {
             if (before != null) {
@@ -58,10 +66,6 @@ final class StationPoints {
             }
             before = offset;
         }
-        offsets = all.stream().mapToDouble(Double::doubleValue).toArray();
-        profile = Arrays.stream(asked).mapToInt(this::indexOf).toArray();
-        left = indexOf(edges.leftOffsetMetres());
-        right = indexOf(edges.rightOffsetMetres());
     }
 
     private static void add(TreeSet<Double> all, double offset) {

@@ -26,6 +26,9 @@ import spanfield.study.result.StationInfo;
 /** Computes everything at one station: the profile, the edges, and the greatest values, for every load case. */
 final class StationRun {
 
+    /** Maxima that are sought for a load case. */
+    private static final int MAXIMA = 4;
+
     private final PreparedStudy study;
     private final FieldComputer computer;
     private final StationInfo station;
@@ -76,6 +79,21 @@ final class StationRun {
         lowestPoint = Math.min(lowestPoint, grid.lowest());
         List<CaseField> fields = computer.fields(state, cases, grid.positions(), progress.silent());
         progress.report(0.5);
+        List<PlacedField> maxima = maxima(state, cases, points, fields, progress);
+        StationGeometry geometry = StationCrossings.of(station, state, study.data().plan());
+        geometries.add(geometry);
+        for (int c = 0; c < cases.size(); c++) {
+            List<PlacedField> own = maxima.subList(MAXIMA * c, MAXIMA * (c + 1));
+            CaseInfo info = cases.get(c).info();
+            results.put(cases.get(c), new ProfileCase(info, series(points, fields.get(c)), row(info, points, fields.get(c), own), geometry));
+            worstRatio = Math.max(worstRatio, fields.get(c).worstRatio());
+            own.forEach(m -> worstRatio = Math.max(worstRatio, FieldComputer.ratio(m.field())));
+        }
+    }
+
+    /** The maxima of each load case: resultant and major axis within the right-of-way, then of the whole profile. */
+    private List<PlacedField> maxima(GeometryState state, List<CaseData> cases, StationPoints points, List<CaseField> fields,
+        PartProgress progress) {
         MaximumSearch search = new MaximumSearch(computer, study, state, station.stationMetres());
         double left = points.offsets()[points.left()];
         double right = points.offsets()[points.right()];
@@ -85,15 +103,7 @@ final class StationRun {
             search.want(c, FieldMeasure.RESULTANT, Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY);
             search.want(c, FieldMeasure.MAJOR_AXIS, Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY);
         }
-        List<PlacedField> maxima = search.find(points.offsets(), fields, cases, progress.silent());
-        StationGeometry geometry = StationCrossings.of(station, state, study.data().plan());
-        geometries.add(geometry);
-        for (int c = 0; c < cases.size(); c++) {
-            EdgeRow row = row(cases.get(c).info(), points, fields.get(c), maxima.subList(4 * c, 4 * c + 4));
-            results.put(cases.get(c), new ProfileCase(cases.get(c).info(), series(points, fields.get(c)), row, geometry));
-            worstRatio = Math.max(worstRatio, fields.get(c).worstRatio());
-            maxima.subList(4 * c, 4 * c + 4).forEach(m -> worstRatio = Math.max(worstRatio, FieldComputer.ratio(m.field())));
-        }
+        return search.find(points.offsets(), fields, cases, progress.silent());
     }
 
     private static FieldSeries series(StationPoints points, CaseField field) {

@@ -85,9 +85,8 @@ final class Stringer {
         try {
             return CatenarySpan.constantForMidspanSag(a.planDistanceTo(b), b.z() - a.z(), rule.value());
         } catch (SolverInputException refused) {
-            problems.add(new GeometryProblem(GeometryRule.STRINGING_SAG_FITS_SPAN, rule.key(), "A sag of " + Texts.number(rule.value())
-                + " m cannot be had in the span " + spanName(span) + ", which is " + Texts.number(a.planDistanceTo(b))
-                + " m long. Give a smaller sag."));
+            problems.add(new GeometryProblem(GeometryRule.STRINGING_SAG_FITS_SPAN, rule.key(),
+                Messages.text("Stringing_SagFitsSpan", rule.value(), spanName(span), a.planDistanceTo(b))));
             return Double.NaN;
         }
     }
@@ -101,9 +100,8 @@ final class Stringer {
                 CatenarySpan.ofConstant(a, b, constant, 0);
             } catch (SolverInputException refused) {
                 problems.add(new GeometryProblem(GeometryRule.STRINGING_CONSTANT_FITS_SPANS, rule.key(),
-                    "'" + member.element.name() + "' cannot hang with a catenary constant of " + Texts.number(constant) + " m " + spanName(i)
-                        + ": the span is " + Texts.number(a.planDistanceTo(b)) + " m long and rises by " + Texts.number(b.z() - a.z())
-                        + " m. String it more tightly."));
+                    Messages.text("Stringing_ConstantFitsSpans", member.element.name(), constant, spanName(i), a.planDistanceTo(b),
+                        b.z() - a.z())));
                 return false;
             }
         }
@@ -111,8 +109,7 @@ final class Stringer {
     }
 
     private String spanName(int span) {
-        return "between '" + line.structures().get(span).name() + "' and '" + line.structures().get(span + 1).name() + "' of line '"
-            + line.name() + "'";
+        return Messages.text("span", structure(span), structure(span + 1), line.name());
     }
 
     private void stringByClearance() {
@@ -120,13 +117,11 @@ final class Stringer {
         double slackest = slackestCurvature();
         double lowest = clearance(slackest);
         if (!(straight > rule.value() && lowest < rule.value())) {
+            String from = structure(section.fromStructure());
+            String to = structure(section.toStructure());
             problems.add(new GeometryProblem(GeometryRule.STRINGING_CLEARANCE_REACHABLE, rule.key(), straight <= rule.value()
-                ? "A clearance of " + Texts.number(rule.value()) + " m cannot be had in the section from '" + structure(section.fromStructure())
-                    + "' to '" + structure(section.toStructure()) + "' of line '" + line.name() + "': even straight wires come as near as "
-                    + Texts.number(straight) + " m to the ground. Give a smaller clearance, or raise the attachments."
-                : "A clearance of " + Texts.number(rule.value()) + " m would need more sag than wires can have in the section from '"
-                    + structure(section.fromStructure()) + "' to '" + structure(section.toStructure()) + "' of line '" + line.name()
-                    + "'. Give a greater clearance."));
+                ? Messages.text("Stringing_ClearanceReachable.high", rule.value(), from, to, line.name(), straight)
+                : Messages.text("Stringing_ClearanceReachable.low", rule.value(), from, to, line.name())));
             return;
         }
         double curvature = new BrentSolver(1e-15, 1e-18, CLEARANCE_TOLERANCE_METRES / 10).solve(500,

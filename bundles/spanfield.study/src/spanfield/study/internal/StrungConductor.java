@@ -65,13 +65,12 @@ final class StrungConductor {
 
     /** Name for messages, e.g. "phase A of 'North 1'". */
     String name() {
-        return element.shield() ? "shield wire '" + element.name() + "'" : "phase " + phase().label() + " of '" + element.name() + "'";
+        return element.shield() ? Messages.text("shieldWire", element.name()) : Messages.text("phase", phase().label(), element.name());
     }
 
     /** Where a span is, for messages. */
     String spanName(int span) {
-        return "between '" + line.structures().get(span).name() + "' and '" + line.structures().get(span + 1).name() + "' of line '"
-            + line.name() + "'";
+        return Messages.text("span", line.structures().get(span).name(), line.structures().get(span + 1).name(), line.name());
     }
 
     /** Path of the bundle's centre, swung. */

@@ -94,13 +94,11 @@ public final class StudyRunner {
             for (int i = 0; i < all.size(); i++) {
                 Wire wire = inside.wireAt(all.position(i));
                 if (wire != null) {
-                    throw new StudyInputException("At station " + Texts.number(station.stationMetres()) + " m the profile point at offset "
-                        + Texts.number(all.offset(i)) + " m lies in " + wire.name() + ". Choose another station or reference height.");
+                    throw new StudyInputException(Messages.text("profilePointInWire", station.stationMetres(), all.offset(i), wire.name()));
                 }
             }
             if (!imageDefined(study, state, grid.lowest())) {
-                throw new StudyInputException("At station " + Texts.number(station.stationMetres()) + " m the profile lies so far below the "
-                    + "earth plane that no complex image exists. Choose another station, or no earth model.");
+                throw new StudyInputException(Messages.text("profileBelowImages", station.stationMetres()));
             }
         }
     }
@@ -121,17 +119,16 @@ public final class StudyRunner {
      */
     public static PreparedStudy withEarthModel(PreparedStudy study, EarthModel model) {
         if (model != EarthModel.NONE && study.data().frequencyHertz() == 0) {
-            throw new StudyInputException("Direct current has no earth effect: choose no earth model.");
+            throw new StudyInputException(Messages.text("directCurrentHasNoEarth"));
         }
         if (model != EarthModel.NONE && Double.isNaN(study.data().resistivity())) {
-            throw new StudyInputException("The study has no earth resistivity: give one in the study, or choose no earth model.");
+            throw new StudyInputException(Messages.text("earthNeedsResistivity"));
         }
         PreparedStudy changed = study.with(study.data().relativeAccuracy(), model, study.data().cases(), study.data().stations());
         for (StationData station : study.data().stations()) {
             double lowest = ProfileGrid.of(station.info(), study.data().plan(), study.data().referenceHeight()).lowest();
             if (!states(changed).stream().allMatch(state -> imageDefined(changed, state, lowest))) {
-                throw new StudyInputException("Station '" + station.info().name() + "' lies so far below the earth plane that no complex image "
-                    + "exists: choose no earth model.");
+                throw new StudyInputException(Messages.text("stationBelowImages", station.info().name()));
             }
         }
         return changed;
@@ -154,22 +151,19 @@ public final class StudyRunner {
     private static String problem(PreparedStudy study, List<GeometryState> states, List<PointsInWires> inside, FieldPoint point) {
         if (!(Math.abs(point.stationMetres()) <= GREATEST_COORDINATE_METRES && Math.abs(point.offsetMetres()) <= GREATEST_COORDINATE_METRES
             && point.heightMetres() <= GREATEST_COORDINATE_METRES)) {
-            return "The point at station " + point.stationMetres() + " m, offset " + point.offsetMetres() + " m, height "
-                + point.heightMetres() + " m is not within " + (long) GREATEST_COORDINATE_METRES + " m; correct its numbers.";
+            return Messages.text("point.outOfRange", point.stationMetres(), point.offsetMetres(), point.heightMetres(), GREATEST_COORDINATE_METRES);
         }
-        String where = "The point at station " + Texts.number(point.stationMetres()) + " m, offset " + Texts.number(point.offsetMetres())
-            + " m, height " + Texts.number(point.heightMetres()) + " m ";
         if (point.heightMetres() < 0) {
-            return where + "lies below the ground; give a height of 0 or more.";
+            return Messages.text("point.belowGround", point.stationMetres(), point.offsetMetres(), point.heightMetres());
         }
         Position p = position(study.data().plan(), point).position();
         for (int s = 0; s < states.size(); s++) {
             Wire wire = inside.get(s).wireAt(p);
             if (wire != null) {
-                return where + "lies in " + wire.name() + "; move it out of the conductor.";
+                return Messages.text("point.inWire", point.stationMetres(), point.offsetMetres(), point.heightMetres(), wire.name());
             }
             if (!imageDefined(study, states.get(s), p.z())) {
-                return where + "lies so far below the earth plane that no complex image exists; choose no earth model.";
+                return Messages.text("point.belowImages", point.stationMetres(), point.offsetMetres(), point.heightMetres());
             }
         }
         return null;

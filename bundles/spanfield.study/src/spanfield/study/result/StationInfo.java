@@ -2,6 +2,7 @@
 package spanfield.study.result;
 
 import spanfield.study.StudyInputException;
+import spanfield.study.internal.Messages;
 
 /**
  * A station with the extent of its lateral profile.
@@ -23,23 +24,20 @@ public record StationInfo(String id, String name, double stationMetres, double f
     public static final double GREATEST_COORDINATE_METRES = 1e5;
 
     public StationInfo {
-        require("station in metres", stationMetres);
-        require("first offset of the profile in metres", fromOffsetMetres);
-        require("last offset of the profile in metres", toOffsetMetres);
+        require(Messages.text("request.coordinate.station"), stationMetres);
+        require(Messages.text("request.coordinate.from"), fromOffsetMetres);
+        require(Messages.text("request.coordinate.to"), toOffsetMetres);
         if (!(toOffsetMetres > fromOffsetMetres)) {
-            throw new StudyInputException("The profile at station " + stationMetres + " m goes from offset " + fromOffsetMetres + " m to "
-                + toOffsetMetres + " m; let the last offset be greater than the first");
+            throw new StudyInputException(Messages.text("request.offsets", stationMetres, fromOffsetMetres, toOffsetMetres));
         }
         if (!(spacingMetres > 0) || (toOffsetMetres - fromOffsetMetres) / spacingMetres > GREATEST_POINT_COUNT - 1) {
-            throw new StudyInputException("The profile at station " + stationMetres + " m has a spacing of " + spacingMetres
-                + " m; give a positive spacing that leaves at most " + GREATEST_POINT_COUNT + " points");
+            throw new StudyInputException(Messages.text("request.spacing", stationMetres, spacingMetres, GREATEST_POINT_COUNT));
         }
     }
 
     private static void require(String what, double value) {
         if (!(Math.abs(value) <= GREATEST_COORDINATE_METRES)) {
-            throw new StudyInputException("The " + what + " is " + value + "; give a number between " + -GREATEST_COORDINATE_METRES + " and "
-                + GREATEST_COORDINATE_METRES);
+            throw new StudyInputException(Messages.text("request.coordinate", what, value, -GREATEST_COORDINATE_METRES, GREATEST_COORDINATE_METRES));
         }
     }
 

@@ -214,7 +214,7 @@ class EvidenceTest {
         StudySnapshot changed = snapshot.withEarthModel(EarthModel.NONE).withAccuracy(1e-4);
         Evidence e = new StudyRun().edgeTable(changed, Progress.NONE).evidence();
         assertTrue(says(e, "earth model was chosen on request"));
-        assertTrue(says(e, "accuracy was asked as 1.0E-4 on request"));
+        assertTrue(says(e, "accuracy was asked as 0.0001 on request"));
         assertEquals(snapshot.digest(), e.studyDigest());
         assertEquals(EarthModel.NONE, e.earthModel());
         assertFalse(says(new StudyRun().edgeTable(snapshot, Progress.NONE).evidence(), "on request"));
