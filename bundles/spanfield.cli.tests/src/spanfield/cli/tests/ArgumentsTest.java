@@ -53,7 +53,7 @@ class ArgumentsTest {
         "edges STUDY --case night | unknown load case 'night'; the study has: loadcase-rating (Rating), loadcase-peak (Peak), loadcase-typical (Typical)",
         "edges STUDY --station midspan | unknown station 'midspan'; the study has: profilestation-mid-span (Mid-span), profilestation-mid-span-2-3 (Mid-span 2-3); did you mean 'Mid-span'?",
         "profile STUDY --station tower | unknown station 'tower'; the study has: profilestation-mid-span (Mid-span), profilestation-mid-span-2-3 (Mid-span 2-3); a number is a position along the corridor in m",
-        "profile STUDY --station 1e9 --length ft | The station in metres is 3.048E8; give a number between -100000.0 and 100000.0",
+        "profile STUDY --station 1e9 --length ft | The station in metres is 3.048e8; give a number between -100000 and 100000.",
         "profile STUDY --width 800 | --width is for --png, which is not given; an SVG has no width in pixels",
         "profile STUDY --png x.png --width 12 | --width '12' is not a whole number from 320 to 10000",
         "profile STUDY --png x.png --width wide | --width 'wide' is not a whole number from 320 to 10000",
@@ -86,7 +86,7 @@ class ArgumentsTest {
     void accuracyOutOfRange_isRefused() {
         Outcome outcome = Cli.run("edges", StudyOnDisk.sound(folder), "--accuracy", "0.5");
         assertEquals(ExitCode.BAD_ARGUMENTS, outcome.code());
-        assertTrue(outcome.err().startsWith("spanfield: The relative accuracy is 0.5; give a number from 1.0E-12 to 0.01"), outcome.err());
+        assertTrue(outcome.err().startsWith("spanfield: The relative accuracy is 0.5; give a number from 1e-12 to 0.01"), outcome.err());
     }
 
     @Test

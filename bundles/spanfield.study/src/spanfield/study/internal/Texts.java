@@ -12,7 +12,7 @@ final class Texts {
     private Texts() {
     }
 
-    /** A number with four significant digits, without exponent and trailing zeros where that is readable. */
+    /** A number with four significant digits, without trailing zeros, with an exponent only where it is hard to read otherwise. */
     static String number(double value) {
         if (Double.isNaN(value) || Double.isInfinite(value)) {
             return Double.toString(value);
@@ -23,7 +23,8 @@ final class Texts {
         }
         double magnitude = Math.abs(value);
         if (magnitude >= 1e7 || magnitude < 1e-4) {
-            return String.format(java.util.Locale.ROOT, "%.2e", value);
+            int exponent = rounded.precision() - rounded.scale() - 1;
+            return rounded.movePointLeft(exponent).stripTrailingZeros().toPlainString() + "e" + exponent;
         }
         return rounded.stripTrailingZeros().toPlainString();
     }
