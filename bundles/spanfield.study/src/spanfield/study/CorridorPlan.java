@@ -2,6 +2,10 @@
 package spanfield.study;
 
 import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+import spanfield.model.Corridor;
 import spanfield.study.internal.PlanPolyline;
 
 /**
@@ -68,6 +72,25 @@ public final class CorridorPlan {
         this.section = copy(section);
         this.crossSlope = crossSlope;
         this.edges = copy(edges);
+    }
+
+    /** The plan of a modelled corridor with at least one edge point. Points may be in any order. */
+    public static CorridorPlan of(Corridor corridor) {
+        double[][] bends = table(corridor.getBends(), b -> b.getStationMetres(), b -> Math.toRadians(b.getDeflectionDegrees()));
+        double[][] elevations = table(corridor.getCentrelineElevations(), e -> e.getStationMetres(), e -> e.getElevationMetres());
+        double[][] section = table(corridor.getGroundPoints(), g -> g.getOffsetMetres(), g -> g.getElevationMetres());
+        double[][] edges = table(corridor.getEdges(), e -> e.getStationMetres(), e -> e.getLeftOffsetMetres(), e -> e.getRightOffsetMetres());
+        return new CorridorPlan(bends[0], bends[1], elevations, section, corridor.getCrossSlope(), edges);
+    }
+
+    @SafeVarargs
+    private static <T> double[][] table(List<T> rows, ToDoubleFunction<T>... columns) {
+        List<T> sorted = rows.stream().sorted(Comparator.comparingDouble(columns[0])).toList();
+        double[][] result = new double[columns.length][];
+        for (int c = 0; c < columns.length; c++) {
+            result[c] = sorted.stream().mapToDouble(columns[c]).toArray();
+        }
+        return result;
     }
 
     private static double[][] copy(double[][] table) {

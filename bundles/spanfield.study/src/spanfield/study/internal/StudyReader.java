@@ -2,13 +2,11 @@
 package spanfield.study.internal;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.HashMap;
 import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.complex.Complex;
 import org.eclipse.emf.ecore.EObject;
 import spanfield.model.Attachment;
@@ -18,7 +16,6 @@ import spanfield.model.Circuit;
 import spanfield.model.CircuitLoad;
 import spanfield.model.ClearanceStringing;
 import spanfield.model.Conductor;
-import spanfield.model.Corridor;
 import spanfield.model.CurrentLoad;
 import spanfield.model.FieldLimit;
 import spanfield.model.FieldQuantity;
@@ -93,7 +90,7 @@ public final class StudyReader {
         Double resistivity = study.getEarthResistivityOhmMetres();
         data = new StudyData(text(study.getId()), nameOf(study), study.getFrequencyHertz(), orNaN(resistivity),
             earthModel(study, resistivity), formula(study), study.getReferenceHeightMetres(), study.getRelativeAccuracy(),
-            readPlan(study.getCorridor()), List.copyOf(lines), List.copyOf(cases), List.copyOf(stations), List.copyOf(limits),
+            CorridorPlan.of(study.getCorridor()), List.copyOf(lines), List.copyOf(cases), List.copyOf(stations), List.copyOf(limits),
             study.getLimits().size() - limits.size());
     }
 
@@ -128,24 +125,6 @@ public final class StudyReader {
             case COMPLEX_DEPTH -> ImpedanceFormula.COMPLEX_DEPTH;
             case CARSON -> ImpedanceFormula.CARSON;
         };
-    }
-
-    private static CorridorPlan readPlan(Corridor corridor) {
-        double[][] bends = table(corridor.getBends(), b -> b.getStationMetres(), b -> Math.toRadians(b.getDeflectionDegrees()));
-        double[][] elevations = table(corridor.getCentrelineElevations(), e -> e.getStationMetres(), e -> e.getElevationMetres());
-        double[][] section = table(corridor.getGroundPoints(), g -> g.getOffsetMetres(), g -> g.getElevationMetres());
-        double[][] edges = table(corridor.getEdges(), e -> e.getStationMetres(), e -> e.getLeftOffsetMetres(), e -> e.getRightOffsetMetres());
-        return new CorridorPlan(bends[0], bends[1], elevations, section, corridor.getCrossSlope(), edges);
-    }
-
-    @SafeVarargs
-    private static <T> double[][] table(List<T> rows, ToDoubleFunction<T>... columns) {
-        List<T> sorted = rows.stream().sorted(Comparator.comparingDouble(columns[0])).toList();
-        double[][] result = new double[columns.length][];
-        for (int c = 0; c < columns.length; c++) {
-            result[c] = sorted.stream().mapToDouble(columns[c]).toArray();
-        }
-        return result;
     }
 
     private LineData readLine(Line line, int index) {

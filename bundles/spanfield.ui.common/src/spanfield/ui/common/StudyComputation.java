@@ -12,6 +12,7 @@ import org.eclipse.core.runtime.IStatus;
 import org.eclipse.core.runtime.Status;
 import org.eclipse.core.runtime.jobs.Job;
 import org.eclipse.swt.widgets.Display;
+import spanfield.model.Study;
 import spanfield.model.validation.Finding;
 import spanfield.solver.Progress;
 import spanfield.solver.SolverCancelledException;
@@ -51,11 +52,13 @@ public final class StudyComputation {
      * @param findings everything that the checks have found
      * @param profiles profiles by identifier of the station, those that are ready
      * @param edges    edge table, or null while it is not ready
+     * @param snapshot the study that the results belong to, or null without results
      * @param message  why it failed, or empty
      */
-    public record Outcome(State state, List<Finding> findings, Map<String, LateralProfile> profiles, EdgeTable edges, String message) {
+    public record Outcome(State state, List<Finding> findings, Map<String, LateralProfile> profiles, EdgeTable edges, StudySnapshot snapshot,
+        String message) {
 
-        static final Outcome NOTHING = new Outcome(State.IDLE, List.of(), Map.of(), null, "");
+        static final Outcome NOTHING = new Outcome(State.IDLE, List.of(), Map.of(), null, null, "");
 
         /** Number of findings that are errors. */
         public long errors() {
@@ -70,6 +73,7 @@ public final class StudyComputation {
     private Outcome outcome = Outcome.NOTHING;
     private Job job;
     private String firstStation = "";
+    private Study preview;
     private boolean requested;
     private boolean disposed;
 
@@ -97,8 +101,24 @@ public final class StudyComputation {
         firstStation = stationId;
     }
 
+    /**
+     * Asks for results of a study that is not the document's: what a drag would make of it. The next request, or another preview, supersedes
+     * it.
+     *
+     * @param changed a changed copy of the study; ownership passes on
+     */
+    public void preview(Study changed) {
+        preview = changed;
+        ask();
+    }
+
     /** Asks for results of the study as it is now. Several requests within one event are one. */
     public void request() {
+        preview = null;
+        ask();
+    }
+
+    private void ask() {
         if (!requested && !disposed) {
             requested = true;
             display.asyncExec(this::start);
@@ -112,15 +132,20 @@ public final class StudyComputation {
         }
         cancel();
         try {
-            StudySnapshot snapshot = StudySnapshot.of(document.study());
-            List<Finding> findings = StudyCheck.check(document.study());
-            publish(new Outcome(State.COMPUTING, findings, outcome.profiles(), outcome.edges(), ""));
+            Study study = preview == null ? document.study() : preview;
+            StudySnapshot snapshot = StudySnapshot.of(study);
+            // A preview keeps the findings: its objects are not the document's.
+            List<Finding> findings = preview == null ? StudyCheck.check(study) : outcome.findings();
+            publish(new Outcome(State.COMPUTING, findings, outcome.profiles(), outcome.edges(), outcome.snapshot(), ""));
             job = new ComputeJob(snapshot, findings);
             job.setPriority(Job.INTERACTIVE);
             job.setSystem(true);
             job.schedule();
         } catch (InvalidStudyException invalid) {
-            publish(new Outcome(State.INVALID, invalid.findings(), Map.of(), null, ""));
+            if (preview != null) {
+                return;
+            }
+            publish(new Outcome(State.INVALID, invalid.findings(), Map.of(), null, null, ""));
         }
     }
 
@@ -177,16 +202,16 @@ public final class StudyComputation {
                 Map<String, LateralProfile> profiles = new LinkedHashMap<>();
                 for (StationInfo station : inOrder()) {
                     profiles.put(station.id(), run.profile(snapshot, station, progress));
-                    post(new Outcome(State.COMPUTING, findings, Map.copyOf(profiles), null, ""), monitor);
+                    post(new Outcome(State.COMPUTING, findings, Map.copyOf(profiles), null, snapshot, ""), monitor);
                 }
                 EdgeTable edges = run.edgeTable(snapshot, progress);
-                post(new Outcome(State.DONE, findings, Map.copyOf(profiles), edges, ""), monitor);
+                post(new Outcome(State.DONE, findings, Map.copyOf(profiles), edges, snapshot, ""), monitor);
                 return Status.OK_STATUS;
             } catch (SolverCancelledException cancelled) {
                 return Status.CANCEL_STATUS;
             } catch (RuntimeException failure) {
                 String message = failure.getMessage() == null ? failure.getClass().getSimpleName() : failure.getMessage();
-                post(new Outcome(State.FAILED, findings, Map.of(), null, message), monitor);
+                post(new Outcome(State.FAILED, findings, Map.of(), null, snapshot, message), monitor);
                 return Status.OK_STATUS;
             }
         }

@@ -1,0 +1,252 @@
+/* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
+package spanfield.ui.section;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.jface.layout.GridDataFactory;
+import org.eclipse.jface.layout.GridLayoutFactory;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Color;
+import org.eclipse.swt.graphics.GC;
+import org.eclipse.swt.graphics.RGB;
+import org.eclipse.swt.graphics.Rectangle;
+import org.eclipse.swt.layout.RowLayout;
+import org.eclipse.swt.widgets.Canvas;
+import org.eclipse.swt.widgets.Combo;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Label;
+import spanfield.model.Line;
+import spanfield.model.Structure;
+import spanfield.report.Numbers;
+import spanfield.report.Units;
+import spanfield.solver.geometry.CatenarySpan;
+import spanfield.solver.geometry.Position;
+import spanfield.solver.geometry.Wire;
+import spanfield.study.CorridorPlan;
+import spanfield.study.StudySnapshot;
+import spanfield.ui.common.DisplayUnits;
+import spanfield.ui.common.StudyComputation;
+import spanfield.ui.common.StudyPage;
+
+/** Elevation along a line: every wire as its catenary, the ground below it, and where the clearance is least. */
+public final class SpanPage extends StudyPage {
+
+    private static final int SAMPLES = 40;
+
+    private Canvas canvas;
+    private Combo lines;
+    private Label least;
+    private StudySnapshot snapshot;
+
+    /** A wire along the line: chainage, elevation, ground elevation of each sample. */
+    private record Course(List<double[]> points) {
+    }
+
+    private List<Course> courses = List.of();
+
+    @Override
+    public Control createControl(Composite parent) {
+        Composite page = new Composite(parent, SWT.NONE);
+        GridLayoutFactory.fillDefaults().margins(6, 6).applyTo(page);
+        Composite bar = new Composite(page, SWT.NONE);
+        RowLayout row = new RowLayout(SWT.HORIZONTAL);
+        row.center = true;
+        bar.setLayout(row);
+        new Label(bar, SWT.NONE).setText("Line");
+        lines = new Combo(bar, SWT.READ_ONLY);
+        lines.addListener(SWT.Selection, event -> rebuild());
+        least = new Label(bar, SWT.NONE);
+        canvas = new Canvas(page, SWT.DOUBLE_BUFFERED);
+        canvas.setBackground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_BACKGROUND));
+        canvas.setForeground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_FOREGROUND));
+        canvas.addPaintListener(event -> paint(event.gc));
+        GridDataFactory.fillDefaults().grab(true, true).applyTo(canvas);
+        modelChanged();
+        return page;
+    }
+
+    @Override
+    public void modelChanged() {
+        String[] names = document().study().getLines().stream().map(line -> String.valueOf(line.getName())).toArray(String[]::new);
+        int before = Math.max(0, lines.getSelectionIndex());
+        if (!java.util.Arrays.equals(names, lines.getItems())) {
+            lines.setItems(names);
+            lines.select(Math.min(before, names.length - 1));
+        }
+    }
+
+    @Override
+    public void computed(StudyComputation.Outcome outcome) {
+        if (outcome.snapshot() != null && outcome.snapshot() != snapshot || outcome.snapshot() == null && outcome.state() == StudyComputation.State.INVALID) {
+            snapshot = outcome.snapshot();
+            rebuild();
+        }
+    }
+
+    private Line chosen() {
+        int index = lines.getSelectionIndex();
+        return index >= 0 && index < document().study().getLines().size() ? document().study().getLines().get(index) : null;
+    }
+
+    private void rebuild() {
+        courses = new ArrayList<>();
+        double lowest = Double.POSITIVE_INFINITY;
+        double where = 0;
+        Line line = chosen();
+        if (snapshot != null && line != null && !snapshot.cases().isEmpty()) {
+            CorridorPlan plan = snapshot.plan();
+            CorridorPlan.PlanPoint start = plan.planPoint(line.getStructures().get(0).getStationMetres(), line.getStructures().get(0).getOffsetMetres());
+            for (Wire wire : snapshot.wires(snapshot.cases().get(0).id())) {
+                if (belongs(wire, line, start)) {
+                    Course course = course(wire, plan);
+                    courses.add(course);
+                    for (double[] p : course.points()) {
+                        if (p[1] - p[2] < lowest) {
+                            lowest = p[1] - p[2];
+                            where = p[0];
+                        }
+                    }
+                }
+            }
+        }
+        Units units = DisplayUnits.get();
+        least.setText(courses.isEmpty() ? "" : "   Least clearance " + Numbers.length(units.length().fromMetres(lowest)) + " " + units.length().code() + " at "
+            + Numbers.fixed(units.length().fromMetres(where), 0) + " " + units.length().code() + " along the line");
+        least.requestLayout();
+        canvas.redraw();
+    }
+
+    /** A wire of the line begins near the axis of its first structure. */
+    private static boolean belongs(Wire wire, Line line, CorridorPlan.PlanPoint start) {
+        double reach = 1 + line.getStructures().get(0).getType().getAttachments().stream().mapToDouble(a -> Math.abs(a.getOffsetMetres())).max().orElse(0);
+        return wire.path().spans().size() == line.getStructures().size() - 1
+            && Math.hypot(wire.path().first().x() - start.x(), wire.path().first().y() - start.y()) <= reach;
+    }
+
+    private static Course course(Wire wire, CorridorPlan plan) {
+        List<double[]> points = new ArrayList<>();
+        double along = 0;
+        for (CatenarySpan span : wire.path().spans()) {
+            for (int i = 0; i <= SAMPLES; i++) {
+                double s = span.horizontalLengthMetres() * i / SAMPLES;
+                Position p = span.at(s);
+                points.add(new double[] {along + s, p.z(), plan.groundElevationAt(p.x(), p.y())});
+            }
+            along += span.horizontalLengthMetres();
+        }
+        return new Course(points);
+    }
+
+    private void paint(GC gc) {
+        Rectangle area = canvas.getClientArea();
+        gc.setAntialias(SWT.ON);
+        gc.setForeground(canvas.getForeground());
+        if (courses.isEmpty()) {
+            gc.drawText("No wires to show. Findings lists what keeps the study from being computed.", 12, 12, true);
+            return;
+        }
+        int line = gc.getFontMetrics().getHeight();
+        double length = 0;
+        double bottom = Double.POSITIVE_INFINITY;
+        double top = Double.NEGATIVE_INFINITY;
+        for (Course course : courses) {
+            for (double[] p : course.points()) {
+                length = Math.max(length, p[0]);
+                bottom = Math.min(bottom, p[2]);
+                top = Math.max(top, p[1]);
+            }
+        }
+        Rectangle plot = new Rectangle(4 * line, 2 * line, area.width - 5 * line, area.height - 5 * line);
+        if (plot.width < 50 || plot.height < 50) {
+            return;
+        }
+        double range = top - bottom + 6;
+        Frame frame = new Frame(plot, length, bottom - 3, range);
+        drawAxes(gc, frame, line);
+        RGB background = canvas.getBackground().getRGB();
+        boolean dark = background.red + background.green + background.blue < 384;
+        gc.setForeground(new Color(dark ? new RGB(190, 160, 120) : new RGB(120, 95, 60)));
+        gc.setLineWidth(2);
+        gc.drawPolyline(frame.path(courses.get(0).points(), 2));
+        gc.setLineWidth(1);
+        gc.setForeground(new Color(dark ? new RGB(140, 180, 255) : new RGB(30, 78, 140)));
+        for (Course course : courses) {
+            gc.drawPolyline(frame.path(course.points(), 1));
+        }
+        drawStructures(gc, frame, line);
+    }
+
+    /** Where lengths along the line and elevations fall in the plot; heights are exaggerated to fill it. */
+    private record Frame(Rectangle plot, double length, double bottom, double range) {
+
+        int x(double along) {
+            return (int) Math.round(plot.x + plot.width * along / length);
+        }
+
+        int y(double elevation) {
+            return (int) Math.round(plot.y + plot.height * (1 - (elevation - bottom) / range));
+        }
+
+        int[] path(List<double[]> points, int column) {
+            int[] path = new int[2 * points.size()];
+            for (int i = 0; i < points.size(); i++) {
+                path[2 * i] = x(points.get(i)[0]);
+                path[2 * i + 1] = y(points.get(i)[column]);
+            }
+            return path;
+        }
+    }
+
+    private void drawAxes(GC gc, Frame frame, int line) {
+        Units units = DisplayUnits.get();
+        gc.setForeground(canvas.getForeground());
+        gc.drawRectangle(frame.plot());
+        for (int i = 0; i <= 5; i++) {
+            double elevation = frame.bottom() + frame.range() * i / 5;
+            gc.drawText(Numbers.fixed(units.length().fromMetres(elevation), 0), 4, frame.y(elevation) - line / 2, true);
+            double along = frame.length() * i / 5;
+            String text = Numbers.fixed(units.length().fromMetres(along), 0);
+            gc.drawText(text, frame.x(along) - gc.textExtent(text).x / 2, frame.plot().y + frame.plot().height + 4, true);
+        }
+        gc.drawText("Elevation, " + units.length().code() + " (heights exaggerated)", 4, 4, true);
+        String title = "Length along the line, " + units.length().code();
+        gc.drawText(title, frame.plot().x + (frame.plot().width - gc.textExtent(title).x) / 2, frame.plot().y + frame.plot().height + line + 6, true);
+    }
+
+    private void drawStructures(GC gc, Frame frame, int line) {
+        gc.setForeground(canvas.getForeground());
+        Line chosen = chosen();
+        Course course = courses.get(0);
+        for (int i = 0; i < chosen.getStructures().size(); i++) {
+            Structure structure = chosen.getStructures().get(i);
+            int number = i;
+            double[] at = course.points().get(sample(number, course));
+            double top = courses.stream().mapToDouble(c -> c.points().get(sample(number, c))[1]).max().orElse(at[1]);
+            gc.drawLine(frame.x(at[0]), frame.y(at[2]), frame.x(at[0]), frame.y(top));
+            String name = String.valueOf(structure.getName());
+            gc.drawText(name, Math.min(frame.x(at[0]) + 3, frame.plot().x + frame.plot().width - gc.textExtent(name).x), frame.plot().y + 2, true);
+        }
+    }
+
+    /** Sample of a course at a structure. */
+    private static int sample(int structure, Course course) {
+        return Math.min(course.points().size() - 1, structure * (SAMPLES + 1));
+    }
+
+    @Override
+    public boolean reveal(EObject object) {
+        Line line = object instanceof Line own ? own : object instanceof Structure structure && structure.eContainer() instanceof Line own ? own : null;
+        if (line != null) {
+            lines.select(document().study().getLines().indexOf(line));
+            rebuild();
+        }
+        return line != null;
+    }
+
+    @Override
+    public void setFocus() {
+        canvas.setFocus();
+    }
+}

@@ -1,0 +1,169 @@
+/* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
+package spanfield.ui.section.internal;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.common.command.CompoundCommand;
+import org.eclipse.emf.edit.command.AddCommand;
+import org.eclipse.emf.edit.command.RemoveCommand;
+import org.eclipse.emf.edit.command.SetCommand;
+import org.eclipse.emf.edit.domain.EditingDomain;
+import spanfield.model.Attachment;
+import spanfield.model.AttachmentRole;
+import spanfield.model.Circuit;
+import spanfield.model.CircuitLoad;
+import spanfield.model.CurrentLoad;
+import spanfield.model.Line;
+import spanfield.model.LoadCase;
+import spanfield.model.Phase;
+import spanfield.model.ShieldWire;
+import spanfield.model.SpanfieldFactory;
+import spanfield.model.SpanfieldPackage;
+import spanfield.model.StringingSection;
+import spanfield.model.StrungElement;
+import spanfield.model.Structure;
+import spanfield.model.StructureType;
+import spanfield.model.Study;
+import spanfield.model.WireStringing;
+import spanfield.model.io.StudyIds;
+
+/** Larger changes of circuits as single commands: add, remove, change the phase order. */
+final class CircuitEdits {
+
+    private static final SpanfieldPackage P = SpanfieldPackage.eINSTANCE;
+    private static final SpanfieldFactory F = SpanfieldFactory.eINSTANCE;
+    private static final double[] ANGLES = {0, -120, 120};
+    private static final double CLEAR_METRES = 6;
+    private static final double SPACING_METRES = 6;
+    private static final double LEAST_HEIGHT_METRES = 14;
+    private static final double INSULATOR_METRES = 1.5;
+
+    private CircuitEdits() {
+    }
+
+    /**
+     * Adds a three-phase circuit to a line: new attachments to the right of the outermost one, on every structure type of the line, and a
+     * current of zero in every load case.
+     */
+    static Command add(EditingDomain domain, Study study, Line line) {
+        CompoundCommand command = new CompoundCommand("Add circuit");
+        String stem = "circuit " + (line.getCircuits().size() + 1) + " phase ";
+        Set<StructureType> types = new LinkedHashSet<>();
+        line.getStructures().stream().map(Structure::getType).filter(java.util.Objects::nonNull).forEach(types::add);
+        for (StructureType type : types) {
+            double outermost = type.getAttachments().stream().mapToDouble(Attachment::getOffsetMetres).max().orElse(0);
+            double lowest = type.getAttachments().stream().filter(a -> a.getRole() == AttachmentRole.PHASE).mapToDouble(Attachment::getHeightMetres).min()
+                .orElse(LEAST_HEIGHT_METRES);
+            for (int i = 0; i < 3; i++) {
+                Attachment attachment = F.createAttachment();
+                attachment.setName(stem + (char) ('A' + i));
+                attachment.setOffsetMetres(outermost + CLEAR_METRES);
+                attachment.setHeightMetres(Math.max(LEAST_HEIGHT_METRES, lowest) + (2 - i) * SPACING_METRES);
+                attachment.setInsulatorLengthMetres(INSULATOR_METRES);
+                command.append(AddCommand.create(domain, type, P.getStructureType_Attachments(), attachment));
+            }
+        }
+        Circuit circuit = F.createCircuit();
+        circuit.setName("Circuit " + (line.getCircuits().size() + 1) + " of " + line.getName());
+        if (!line.getCircuits().isEmpty()) {
+            circuit.setNominalVoltageVolts(line.getCircuits().get(0).getNominalVoltageVolts());
+            circuit.setConductor(line.getCircuits().get(0).getConductor());
+        } else if (!study.getConductors().isEmpty()) {
+            circuit.setConductor(study.getConductors().get(0));
+        }
+        for (int i = 0; i < 3; i++) {
+            Phase phase = F.createPhase();
+            phase.setLabel(String.valueOf((char) ('A' + i)));
+            phase.setAngleDegrees(ANGLES[i]);
+            phase.setAttachment(stem + (char) ('A' + i));
+            circuit.getPhases().add(phase);
+        }
+        StudyIds.assign(circuit, study);
+        command.append(AddCommand.create(domain, line, P.getLine_Circuits(), circuit));
+        for (LoadCase loadCase : study.getLoadCases()) {
+            CurrentLoad load = F.createCurrentLoad();
+            load.setCircuit(circuit);
+            command.append(AddCommand.create(domain, loadCase, P.getLoadCase_Loads(), load));
+        }
+        return command;
+    }
+
+    /** Removes a circuit or shield wire together with its loads and its exceptions of stringing. */
+    static Command remove(EditingDomain domain, Study study, StrungElement element) {
+        Line line = (Line) element.eContainer();
+        CompoundCommand command = new CompoundCommand("Remove " + element.getName());
+        for (LoadCase loadCase : study.getLoadCases()) {
+            for (CircuitLoad load : loadCase.getLoads()) {
+                if (load.getCircuit() == element) {
+                    command.append(RemoveCommand.create(domain, loadCase, P.getLoadCase_Loads(), load));
+                }
+            }
+        }
+        for (StringingSection section : line.getSections()) {
+            for (WireStringing exception : section.getExceptions()) {
+                if (exception.getWires().contains(element)) {
+                    command.append(RemoveCommand.create(domain, exception, P.getWireStringing_Wires(), element));
+                }
+            }
+        }
+        command.append(RemoveCommand.create(domain, line, element instanceof ShieldWire ? P.getLine_ShieldWires() : P.getLine_Circuits(), element));
+        return command;
+    }
+
+    /** The labels of a circuit's phases in the order of its attachments on the structure. */
+    static String order(Circuit circuit) {
+        StringBuilder text = new StringBuilder();
+        for (String attachment : positions(circuit)) {
+            for (Phase phase : circuit.getPhases()) {
+                if (attachment.equals(phase.getAttachment())) {
+                    text.append(phase.getLabel());
+                }
+            }
+        }
+        return text.toString();
+    }
+
+    /** The attachments that a circuit uses, in the order of the structure type. */
+    private static List<String> positions(Circuit circuit) {
+        List<String> used = new ArrayList<>();
+        circuit.getPhases().forEach(phase -> used.add(String.valueOf(phase.getAttachment())));
+        StructureType type = ((Line) circuit.eContainer()).getStructures().get(0).getType();
+        List<String> ordered = new ArrayList<>();
+        if (type != null) {
+            type.getAttachments().stream().map(Attachment::getName).filter(used::contains).forEach(ordered::add);
+        }
+        return ordered.size() == used.size() ? ordered : used;
+    }
+
+    /** Every order of the labels of a circuit of up to three phases. */
+    static List<String> orders(Circuit circuit) {
+        List<String> all = new ArrayList<>();
+        permute("", order(circuit).chars().sorted().collect(StringBuilder::new, StringBuilder::appendCodePoint, StringBuilder::append).toString(), all);
+        return all;
+    }
+
+    private static void permute(String done, String left, List<String> all) {
+        if (left.isEmpty()) {
+            all.add(done);
+        }
+        for (int i = 0; i < left.length(); i++) {
+            permute(done + left.charAt(i), left.substring(0, i) + left.substring(i + 1), all);
+        }
+    }
+
+    /** Puts the phases of a circuit on its attachments in another order. */
+    static Command reorder(EditingDomain domain, Circuit circuit, String order) {
+        CompoundCommand command = new CompoundCommand("Phase order " + order + " of " + circuit.getName());
+        List<String> positions = positions(circuit);
+        for (Phase phase : circuit.getPhases()) {
+            String attachment = positions.get(order.indexOf(phase.getLabel()));
+            if (!attachment.equals(phase.getAttachment())) {
+                command.append(SetCommand.create(domain, phase, P.getPhase_Attachment(), attachment));
+            }
+        }
+        return command;
+    }
+}
