@@ -63,15 +63,16 @@ final class OutputFiles {
 
     /** Writes the contents, in the order in which the files were announced. */
     void write(List<Content> contents) {
+        int at = 0;
         try {
-            for (int i = 0; i < targets.size(); i++) {
-                stage(targets.get(i), contents.get(i));
+            for (at = 0; at < targets.size(); at++) {
+                stage(targets.get(at), contents.get(at));
             }
-            for (int i = 0; i < targets.size(); i++) {
-                move(parts.get(i), targets.get(i));
+            for (at = 0; at < targets.size(); at++) {
+                move(parts.get(at), targets.get(at));
             }
         } catch (IOException failure) {
-            throw CommandException.file("the output cannot be written: " + reason(failure));
+            throw CommandException.file("'" + targets.get(at) + "' cannot be written: " + reason(failure));
         } finally {
             discard();
         }
@@ -117,13 +118,12 @@ final class OutputFiles {
     }
 
     private static String reason(IOException failure) {
-        String file = failure instanceof FileSystemException system && system.getFile() != null ? " ('" + system.getFile() + "')" : "";
         if (failure instanceof AccessDeniedException) {
-            return "writing there is not permitted" + file;
+            return "writing there is not permitted";
         }
         if (failure instanceof NoSuchFileException) {
-            return "the folder is gone" + file;
+            return "the folder is gone";
         }
-        return String.valueOf(failure.getMessage());
+        return failure instanceof FileSystemException system && system.getReason() != null ? system.getReason() : String.valueOf(failure.getMessage());
     }
 }

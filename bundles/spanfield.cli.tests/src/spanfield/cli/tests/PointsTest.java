@@ -139,6 +139,16 @@ class PointsTest {
     }
 
     @Test
+    void lines_areThoseThatAnEditorShows() {
+        for (String end : List.of("\n", "\r\n", "\r")) {
+            String header = "station_m,offset_m,height_m" + end;
+            assertRefused(header + "150,0,1" + end + end + "150,x,1" + end, "standard input, line 4: the offset 'x' is not a number");
+            Outcome below = points(header + end + end + "150,0,1" + end + "150,0,-1" + end);
+            assertTrue(below.err().startsWith("spanfield: standard input, line 5: "), below.err());
+        }
+    }
+
+    @Test
     void lines_areCountedThroughQuotedBreaks() {
         assertRefused("name,station_m,offset_m,height_m\n\"two\nlines\",150,0,1\nb,150,x,1\n", "standard input, line 4: the offset 'x' is not a number");
     }

@@ -25,6 +25,8 @@ import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.NodeList;
 import spanfield.model.FieldMeasure;
+import spanfield.model.LimitBasis;
+import spanfield.model.LimitPlace;
 import spanfield.report.FieldUnit;
 import spanfield.report.LengthUnit;
 import spanfield.report.Units;
@@ -32,6 +34,7 @@ import spanfield.report.plot.PlotOptions;
 import spanfield.report.plot.ProfilePlot;
 import spanfield.report.tests.support.ResultFixtures;
 import spanfield.study.result.LateralProfile;
+import spanfield.study.result.LimitInfo;
 
 /** Pictures of a lateral profile, made without a display. */
 class ProfilePlotTest {
@@ -107,6 +110,49 @@ class ProfilePlotTest {
         assertEquals(profile.cases().size(), curves.size(), curves.toString());
         assertEquals(curves.size(), curves.stream().map(curve -> curve.split(" / ")[0]).distinct().count(), "colours: " + curves);
         assertEquals(curves.size(), curves.stream().map(curve -> curve.split(" / ", -1)[1]).distinct().count(), "dashes: " + curves);
+    }
+
+    private static LimitInfo limit(double microtesla, LimitPlace place) {
+        return new LimitInfo("at-" + microtesla, "Level", FieldMeasure.RESULTANT, microtesla * 1e-6, place, "", "", "", LimitBasis.USER);
+    }
+
+    /** Heights in the drawing of the long dash-dotted lines, from bottom to top. */
+    private static List<Double> limitLines(Document document) {
+        NodeList nodes = document.getElementsByTagName("line");
+        List<Double> heights = new ArrayList<>();
+        for (int i = 0; i < nodes.getLength(); i++) {
+            Element line = (Element) nodes.item(i);
+            if (inherited(line, "stroke-dasharray").equals("14,3,3,3")) {
+                heights.add(Double.valueOf(line.getAttribute("y1")));
+            }
+        }
+        heights.sort(java.util.Comparator.reverseOrder());
+        return heights;
+    }
+
+    /** Heights of the tick labels with a text. */
+    private static double tick(Document document, String label) {
+        NodeList nodes = document.getElementsByTagName("text");
+        List<Double> heights = new ArrayList<>();
+        for (int i = 0; i < nodes.getLength(); i++) {
+            Element text = (Element) nodes.item(i);
+            if (text.getTextContent().equals(label) && text.getAttribute("text-anchor").isEmpty()) {
+                heights.add(Double.valueOf(text.getAttribute("y")));
+            }
+        }
+        return heights.stream().min(Double::compare).orElseThrow();
+    }
+
+    @Test
+    void svg_drawsEveryLimitAtItsLevel() throws Exception {
+        Document document = parse(svg(ResultFixtures.profile(limit(10, LimitPlace.EDGE), limit(20, LimitPlace.WITHIN), limit(35, LimitPlace.EVERYWHERE),
+            HIGH_LIMIT), PlotOptions.DEFAULT));
+        List<Double> lines = limitLines(document);
+        assertEquals(3, lines.size(), lines.toString());
+        double perMicrotesla = (tick(document, "10") - tick(document, "35")) / 25;
+        // coordinates in the SVG have two decimals, tick labels are placed to a pixel
+        assertEquals(10 * perMicrotesla, lines.get(0) - lines.get(1), 1);
+        assertEquals(15 * perMicrotesla, lines.get(1) - lines.get(2), 1);
     }
 
     @Test

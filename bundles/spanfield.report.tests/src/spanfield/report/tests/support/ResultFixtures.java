@@ -88,7 +88,9 @@ public final class ResultFixtures {
                 comparisons.add(compare(limit, limit.place() == LimitPlace.WITHIN ? Where.GREATEST_WITHIN : Where.GREATEST_OF_PROFILE, greatest));
             }
         }
-        return new EdgeRow(STATION, CASES.get(loadCase), left, right, greatest, greatest, greatest, greatest, comparisons);
+        // The major axis is greatest elsewhere than the resultant, so that a report that confuses the two is found out.
+        PlacedField major = placed(loadCase, middle + 1.5);
+        return new EdgeRow(STATION, CASES.get(loadCase), left, right, greatest, major, greatest, major, comparisons);
     }
 
     private static LimitComparison compare(LimitInfo limit, Where where, PlacedField placed) {
