@@ -12,10 +12,8 @@ import java.util.function.Function;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.jface.layout.GridDataFactory;
 import org.eclipse.jface.layout.GridLayoutFactory;
-import org.eclipse.jface.layout.TableColumnLayout;
 import org.eclipse.jface.viewers.ArrayContentProvider;
 import org.eclipse.jface.viewers.ColumnLabelProvider;
-import org.eclipse.jface.viewers.ColumnWeightData;
 import org.eclipse.jface.viewers.TableViewer;
 import org.eclipse.jface.viewers.TableViewerColumn;
 import org.eclipse.jface.viewers.Viewer;
@@ -30,6 +28,7 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.FileDialog;
 import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.TableColumn;
 import spanfield.report.EdgeReport;
 import spanfield.report.Numbers;
 import spanfield.report.Units;
@@ -66,17 +65,14 @@ public final class EdgeTablePage extends StudyPage {
         button(bar, "Copy", this::copy);
         note = new Label(bar, SWT.NONE);
         note.setText("Nothing computed yet");
-        Composite holder = new Composite(page, SWT.NONE);
-        GridDataFactory.fillDefaults().grab(true, true).applyTo(holder);
-        TableColumnLayout layout = new TableColumnLayout();
-        holder.setLayout(layout);
-        viewer = new TableViewer(holder, SWT.FULL_SELECTION | SWT.MULTI | SWT.BORDER);
+        viewer = new TableViewer(page, SWT.FULL_SELECTION | SWT.MULTI | SWT.BORDER | SWT.H_SCROLL | SWT.V_SCROLL);
+        GridDataFactory.fillDefaults().grab(true, true).applyTo(viewer.getTable());
         viewer.getTable().setHeaderVisible(true);
         viewer.getTable().setLinesVisible(true);
         viewer.setContentProvider(ArrayContentProvider.getInstance());
         defineColumns();
         for (Column column : columns) {
-            addColumn(layout, column);
+            addColumn(column);
         }
         Label caution = new Label(page, SWT.WRAP);
         caution.setText("For planning and screening. Numerical: bound of the computation's own error. Earth: difference between the two earth models. "
@@ -149,11 +145,11 @@ public final class EdgeTablePage extends StudyPage {
         };
     }
 
-    private void addColumn(TableColumnLayout layout, Column column) {
+    private void addColumn(Column column) {
         boolean text = columns.indexOf(column) < 2 || columns.indexOf(column) == 8 || columns.indexOf(column) == 10;
         TableViewerColumn shown = new TableViewerColumn(viewer, text ? SWT.LEFT : SWT.RIGHT);
         shown.getColumn().setText(column.title().apply(DisplayUnits.get()));
-        layout.setColumnData(shown.getColumn(), new ColumnWeightData(columns.indexOf(column) == 8 ? 22 : 10, 70));
+        shown.getColumn().pack();
         shown.setLabelProvider(new ColumnLabelProvider() {
             @Override
             public String getText(Object element) {
@@ -190,7 +186,13 @@ public final class EdgeTablePage extends StudyPage {
                 for (int i = 0; i < columns.size(); i++) {
                     viewer.getTable().getColumn(i).setText(columns.get(i).title().apply(DisplayUnits.get()));
                 }
+                boolean first = viewer.getTable().getItemCount() == 0;
                 viewer.setInput(table.rows());
+                if (first) {
+                    for (TableColumn column : viewer.getTable().getColumns()) {
+                        column.pack();
+                    }
+                }
                 note.setText("Up to date: " + table.rows().size() + " rows");
             }
             case COMPUTING -> note.setText("Being computed; the rows are those of the study before the last change");

@@ -38,6 +38,7 @@ import spanfield.report.plot.PlotOptions;
 import spanfield.report.plot.ProfilePlot;
 import spanfield.study.result.LateralProfile;
 import spanfield.ui.common.DisplayUnits;
+import spanfield.ui.common.ProfileCanvas;
 import spanfield.ui.common.StudyComputation;
 import spanfield.ui.common.StudyPage;
 
@@ -77,7 +78,7 @@ public final class ProfilePage extends StudyPage {
         logarithmic.addListener(SWT.Selection, event -> configure());
         button(bar, "Export...", this::export);
         button(bar, "Copy", this::copy);
-        canvas = new ProfileCanvas(page);
+        canvas = new ProfileCanvas(page, false);
         GridDataFactory.fillDefaults().grab(true, true).applyTo(canvas);
         Composite side = new Composite(page, SWT.NONE);
         GridLayoutFactory.fillDefaults().applyTo(side);

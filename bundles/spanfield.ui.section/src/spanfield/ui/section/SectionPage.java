@@ -5,6 +5,7 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.jface.layout.GridDataFactory;
 import org.eclipse.jface.layout.GridLayoutFactory;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.layout.RowLayout;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Combo;
@@ -14,17 +15,22 @@ import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Menu;
 import org.eclipse.swt.widgets.MenuItem;
 import spanfield.model.Circuit;
+import spanfield.model.FieldMeasure;
 import spanfield.model.Line;
 import spanfield.model.ProfileStation;
+import spanfield.study.result.LateralProfile;
+import spanfield.ui.common.DisplayUnits;
+import spanfield.ui.common.ProfileCanvas;
 import spanfield.ui.common.StudyComputation;
 import spanfield.ui.common.StudyPage;
 import spanfield.ui.section.internal.SectionView;
 
-/** The corridor in section at a station, to scale: structures, wires and edges can be dragged, and the field follows while they move. */
+/** The corridor in section at a station, to scale, with the profile above it: wires, structures and edges are dragged, and the field follows. */
 public final class SectionPage extends StudyPage {
 
     private SectionView view;
     private Combo stations;
+    private ProfileCanvas profile;
     private Label reading;
     private Button phaseOrder;
 
@@ -50,11 +56,14 @@ public final class SectionPage extends StudyPage {
         button(bar, "Remove", () -> view.removeSelected()).setToolTipText("Remove the chosen circuit or shield wire");
         phaseOrder = button(bar, "Phase order", this::showOrders);
         phaseOrder.setToolTipText("Change the order of the phases of the chosen circuit");
-        view = new SectionView(page, editor(), text -> {
+        SashForm halves = new SashForm(page, SWT.VERTICAL);
+        GridDataFactory.fillDefaults().grab(true, true).applyTo(halves);
+        profile = new ProfileCanvas(halves, true);
+        view = new SectionView(halves, editor(), text -> {
             reading.setText(text);
             reading.requestLayout();
         });
-        GridDataFactory.fillDefaults().grab(true, true).applyTo(view.control());
+        halves.setWeights(35, 65);
         reading = new Label(page, SWT.WRAP);
         reading.setText(SectionView.HINT);
         GridDataFactory.fillDefaults().grab(true, false).applyTo(reading);
@@ -96,6 +105,7 @@ public final class SectionPage extends StudyPage {
             ProfileStation station = document().study().getStations().get(index);
             editor().computation().prefer(String.valueOf(station.getId()));
             view.show(station);
+            computed(editor().computation().outcome());
         }
     }
 
@@ -117,6 +127,14 @@ public final class SectionPage extends StudyPage {
     @Override
     public void computed(StudyComputation.Outcome outcome) {
         view.computed(outcome);
+        int index = stations.getSelectionIndex();
+        String id = index >= 0 && index < document().study().getStations().size() ? document().study().getStations().get(index).getId() : "";
+        boolean waiting = outcome.state() == StudyComputation.State.COMPUTING;
+        LateralProfile fresh = outcome.profiles().get(id);
+        profile.configure(DisplayUnits.get(), FieldMeasure.RESULTANT, any -> true, false);
+        if (fresh != null || !waiting) {
+            profile.show(fresh, false);
+        }
     }
 
     @Override

@@ -26,6 +26,7 @@ import spanfield.solver.geometry.Position;
 import spanfield.solver.geometry.Wire;
 import spanfield.study.CorridorPlan;
 import spanfield.study.StudySnapshot;
+import spanfield.ui.common.AxisScale;
 import spanfield.ui.common.DisplayUnits;
 import spanfield.ui.common.StudyComputation;
 import spanfield.ui.common.StudyPage;
@@ -203,12 +204,15 @@ public final class SpanPage extends StudyPage {
         Units units = DisplayUnits.get();
         gc.setForeground(canvas.getForeground());
         gc.drawRectangle(frame.plot());
-        for (int i = 0; i <= 5; i++) {
-            double elevation = frame.bottom() + frame.range() * i / 5;
-            gc.drawText(Numbers.fixed(units.length().fromMetres(elevation), 0), 4, frame.y(elevation) - line / 2, true);
-            double along = frame.length() * i / 5;
-            String text = Numbers.fixed(units.length().fromMetres(along), 0);
-            gc.drawText(text, frame.x(along) - gc.textExtent(text).x / 2, frame.plot().y + frame.plot().height + 4, true);
+        AxisScale up = new AxisScale(units.length().fromMetres(frame.bottom()), units.length().fromMetres(frame.bottom() + frame.range()),
+            frame.plot().y + frame.plot().height, frame.plot().y, false);
+        for (double tick : up.ticks(6)) {
+            gc.drawText(Numbers.stated(tick), 4, up.toPixel(tick) - line / 2, true);
+        }
+        AxisScale across = new AxisScale(0, units.length().fromMetres(frame.length()), frame.plot().x, frame.plot().x + frame.plot().width, false);
+        for (double tick : across.ticks(8)) {
+            String text = Numbers.stated(tick);
+            gc.drawText(text, across.toPixel(tick) - gc.textExtent(text).x / 2, frame.plot().y + frame.plot().height + 4, true);
         }
         gc.drawText("Elevation, " + units.length().code() + " (heights exaggerated)", 4, 4, true);
         String title = "Length along the line, " + units.length().code();

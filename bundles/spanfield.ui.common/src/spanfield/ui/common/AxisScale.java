@@ -1,5 +1,5 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
-package spanfield.ui.results;
+package spanfield.ui.common;
 
 import java.util.ArrayList;
 import java.util.List;

@@ -1,5 +1,5 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
-package spanfield.ui.results;
+package spanfield.ui.common;
 
 import java.util.List;
 import java.util.function.Predicate;
@@ -30,6 +30,7 @@ public final class ProfileCanvas extends Canvas {
     /** Decades below the greatest value that a logarithmic axis shows. */
     private static final double DECADES = 1e-4;
 
+    private final boolean compact;
     private LateralProfile profile;
     private Units units = Units.SI;
     private FieldMeasure measure = FieldMeasure.RESULTANT;
@@ -40,8 +41,13 @@ public final class ProfileCanvas extends Canvas {
     private AxisScale across;
     private AxisScale up;
 
-    public ProfileCanvas(Composite parent) {
+    /**
+     * @param parent where the chart goes
+     * @param small  whether the legend is left out, for a chart that accompanies something else
+     */
+    public ProfileCanvas(Composite parent, boolean small) {
         super(parent, SWT.DOUBLE_BUFFERED);
+        compact = small;
         addPaintListener(event -> paint(event.gc));
         addListener(SWT.MouseMove, event -> moveCursor(event.x));
         addListener(SWT.MouseExit, event -> moveCursor(-1));
@@ -101,7 +107,7 @@ public final class ProfileCanvas extends Canvas {
             return;
         }
         int line = gc.getFontMetrics().getHeight();
-        int legend = (cases().size() + 1) * (line + 2) + 6;
+        int legend = compact ? 0 : (cases().size() + 1) * (line + 2) + 6;
         Rectangle plot = new Rectangle(gc.textExtent("00000.0").x + line + 14, line + 10, 0, 0);
         plot.width = area.width - plot.x - 14;
         plot.height = area.height - plot.y - 2 * line - 16 - legend;
@@ -113,7 +119,9 @@ public final class ProfileCanvas extends Canvas {
         drawEdges(gc, plot, line);
         drawLimits(gc, plot, line);
         drawCurves(gc, plot);
-        drawLegend(gc, plot, line, area);
+        if (!compact) {
+            drawLegend(gc, plot, line, area);
+        }
     }
 
     private void scale(Rectangle plot) {

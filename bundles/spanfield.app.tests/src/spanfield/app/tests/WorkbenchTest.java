@@ -1,0 +1,322 @@
+/* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
+package spanfield.app.tests;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
+import static org.junit.jupiter.api.Assertions.assertNotNull;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.function.BooleanSupplier;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.GC;
+import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.graphics.ImageData;
+import org.eclipse.swt.graphics.ImageLoader;
+import org.eclipse.swt.graphics.Point;
+import org.eclipse.swt.graphics.Rectangle;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Display;
+import org.eclipse.swt.widgets.Event;
+import org.eclipse.swt.widgets.Shell;
+import org.eclipse.ui.IWorkbenchPage;
+import org.eclipse.ui.IWorkbenchWindow;
+import org.eclipse.ui.PlatformUI;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import spanfield.app.Studies;
+import spanfield.app.StudyTemplate;
+import spanfield.model.Attachment;
+import spanfield.model.Circuit;
+import spanfield.model.FieldMeasure;
+import spanfield.model.Phase;
+import spanfield.model.Study;
+import spanfield.model.io.StudyFiles;
+import spanfield.study.result.EdgeTable;
+import spanfield.ui.common.StudyComputation.State;
+import spanfield.ui.common.StudyEditor;
+import spanfield.ui.common.StudyInput;
+import spanfield.ui.results.EdgeTablePage;
+import spanfield.ui.results.ProfilePage;
+import spanfield.ui.section.SectionPage;
+
+/** Drives the real workbench: open, drag, undo, save, reload, compute, export; and takes a picture of every page. */
+class WorkbenchTest {
+
+    private static final long PATIENCE_MILLIS = 30_000;
+
+    @TempDir
+    Path folder;
+
+    private final Display display = Display.getCurrent();
+    private final IWorkbenchWindow window = PlatformUI.getWorkbench().getActiveWorkbenchWindow();
+    private final IWorkbenchPage page = window.getActivePage();
+
+    @BeforeEach
+    void sizeWindow() {
+        window.getShell().setBounds(0, 0, 1240, 900);
+    }
+
+    @AfterEach
+    void closeEditors() {
+        page.closeAllEditors(false);
+        pump(() -> page.getEditorReferences().length == 0);
+    }
+
+    /** Lets events run until something holds. */
+    private void pump(BooleanSupplier done) {
+        long end = System.currentTimeMillis() + PATIENCE_MILLIS;
+        while (!done.getAsBoolean()) {
+            if (System.currentTimeMillis() > end) {
+                throw new AssertionError("waited in vain");
+            }
+            if (!display.readAndDispatch()) {
+                display.timerExec(20, () -> { });
+                display.sleep();
+            }
+        }
+    }
+
+    private void settle(StudyEditor editor) {
+        pump(() -> editor.computation().outcome().state() == State.DONE || editor.computation().outcome().state() == State.INVALID);
+        while (display.readAndDispatch()) {
+            // until nothing is left to do
+        }
+    }
+
+    private StudyEditor openExample(String name) throws IOException {
+        Path copy = folder.resolve(name + ".spanfield");
+        Files.copy(Path.of(System.getProperty("spanfield.examples"), name, name + ".spanfield"), copy);
+        Studies.open(window, copy);
+        StudyEditor editor = (StudyEditor) page.getActiveEditor();
+        settle(editor);
+        return editor;
+    }
+
+    private <T> T showPage(StudyEditor editor, Class<T> type) {
+        int position = editor.pagePositions().get(type.getSimpleName());
+        editor.showPage(position);
+        while (display.readAndDispatch()) {
+            // layout and paint
+        }
+        return type.cast(editor.pages().get(position));
+    }
+
+    private void picture(String name) throws IOException {
+        Shell shell = window.getShell();
+        Rectangle area = shell.getClientArea();
+        Image image = new Image(display, area.width, area.height);
+        GC gc = new GC(shell);
+        gc.copyArea(image, 0, 0);
+        gc.dispose();
+        ImageLoader loader = new ImageLoader();
+        loader.data = new ImageData[] {image.getImageData()};
+        image.dispose();
+        Path target = Path.of(System.getProperty("spanfield.pictures"));
+        Files.createDirectories(target);
+        loader.save(target.resolve(name + ".png").toString(), SWT.IMAGE_PNG);
+    }
+
+    private static void mouse(Control control, int type, int x, int y, boolean pressed) {
+        Event event = new Event();
+        event.x = x;
+        event.y = y;
+        event.button = type == SWT.MouseMove ? 0 : 1;
+        event.count = 1;
+        event.stateMask = pressed ? SWT.BUTTON1 : 0;
+        control.notifyListeners(type, event);
+    }
+
+    private void drag(Control control, Point from, int dx, int dy) {
+        mouse(control, SWT.MouseMove, from.x, from.y, false);
+        mouse(control, SWT.MouseDown, from.x, from.y, false);
+        for (int i = 1; i <= 4; i++) {
+            mouse(control, SWT.MouseMove, from.x + dx * i / 4, from.y + dy * i / 4, true);
+            while (display.readAndDispatch()) {
+                // feedback and preview
+            }
+        }
+        mouse(control, SWT.MouseUp, from.x + dx, from.y + dy, true);
+    }
+
+    /** Waits until results are complete and something holds of the value at the left edge. */
+    private void pumpEdge(StudyEditor editor, java.util.function.DoublePredicate holds) {
+        pump(() -> editor.computation().outcome().state() == State.DONE && holds.test(leftEdge(editor)));
+    }
+
+    private static double leftEdge(StudyEditor editor) {
+        EdgeTable edges = editor.computation().outcome().edges();
+        return edges.rows().get(0).leftEdge().field().tesla(FieldMeasure.RESULTANT);
+    }
+
+    @Test
+    void everyPage_showsTheStudy() throws IOException {
+        StudyEditor editor = openExample("two-lines");
+        assertEquals(State.DONE, editor.computation().outcome().state());
+        for (String name : editor.pagePositions().keySet()) {
+            editor.showPage(editor.pagePositions().get(name));
+            settle(editor);
+            picture(name);
+        }
+        assertEquals(12, showPage(editor, EdgeTablePage.class).rowCount());
+        assertFalse(editor.isDirty());
+    }
+
+    @Test
+    void draggedPhase_movesItsAttachmentAndTheFieldAndCanBeUndone() throws IOException {
+        StudyEditor editor = openExample("two-lines");
+        SectionPage section = showPage(editor, SectionPage.class);
+        Study study = editor.document().study();
+        Circuit east = study.getLines().get(0).getCircuits().get(0);
+        Phase phase = east.getPhases().get(0);
+        Attachment attachment = study.getStructureTypes().get(0).getAttachments().get(0);
+        assertEquals(phase.getAttachment(), attachment.getName());
+        double offset = attachment.getOffsetMetres();
+        double before = leftEdge(editor);
+        Point place = section.view().placeOf(phase);
+        assertNotNull(place, "the phase is shown");
+        int pixels = -section.view().pixels(4);
+        drag(section.view().control(), place, pixels, 0);
+        pump(() -> attachment.getOffsetMetres() != offset);
+        settle(editor);
+        pumpEdge(editor, value -> value != before);
+        assertEquals(offset - 4, attachment.getOffsetMetres(), 0.2);
+        assertTrue(leftEdge(editor) > before, "nearer to the left edge, the field there rises");
+        assertTrue(editor.isDirty());
+        picture("SectionPage-dragged");
+        assertEquals("Move phase 'A'", editor.document().commands().getUndoCommand().getLabel());
+        editor.document().commands().undo();
+        pumpEdge(editor, value -> value == before);
+        assertEquals(offset, attachment.getOffsetMetres(), 0);
+        assertFalse(editor.isDirty());
+        editor.document().commands().redo();
+        pumpEdge(editor, value -> value != before);
+        assertEquals(offset - 4, attachment.getOffsetMetres(), 0.2);
+    }
+
+    @Test
+    void preview_changesResultsButNotTheStudy() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        double before = leftEdge(editor);
+        byte[] saved = StudyFiles.serialize(editor.document().study());
+        Study changed = StudyFiles.copy(editor.document().study());
+        changed.getStructureTypes().get(0).getAttachments().forEach(a -> a.setHeightMetres(a.getHeightMetres() + 5));
+        editor.computation().preview(changed);
+        pumpEdge(editor, value -> value < before);
+        assertEquals(new String(saved, StandardCharsets.UTF_8), new String(StudyFiles.serialize(editor.document().study()), StandardCharsets.UTF_8));
+        editor.computation().request();
+        pumpEdge(editor, value -> value == before);
+    }
+
+    @Test
+    void newTwoCircuitStudy_isReorderedSavedAndReloaded() throws Exception {
+        Study fresh = StudyTemplate.DOUBLE_VERTICAL.create("Fresh", 50, 220e3, 800);
+        Studies.openFresh(window, fresh, "fresh");
+        StudyEditor editor = (StudyEditor) page.getActiveEditor();
+        settle(editor);
+        assertEquals(State.DONE, editor.computation().outcome().state(), editor.computation().outcome().findings().toString());
+        assertTrue(editor.isDirty());
+        double before = leftEdge(editor);
+        SectionPage section = showPage(editor, SectionPage.class);
+        Circuit second = editor.document().study().getLines().get(0).getCircuits().get(1);
+        assertEquals("ABC", section.view().order(second));
+        section.view().reorder(second, "CBA");
+        pumpEdge(editor, value -> value != before);
+        settle(editor);
+        assertTrue(leftEdge(editor) < before, "opposite orders lower the field at the edge");
+        Path file = folder.resolve("fresh.spanfield");
+        assertTrue(editor.saveTo(file));
+        assertFalse(editor.isDirty());
+        Study back = StudyFiles.load(file);
+        assertEquals("phase 6", back.getLines().get(0).getCircuits().get(1).getPhases().get(0).getAttachment());
+        double saved = leftEdge(editor);
+        page.closeAllEditors(false);
+        Studies.open(window, file);
+        StudyEditor again = (StudyEditor) page.getActiveEditor();
+        settle(again);
+        assertEquals(saved, leftEdge(again), 0);
+    }
+
+    @Test
+    void addedCircuit_isRemovedWithItsLoads() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        SectionPage section = showPage(editor, SectionPage.class);
+        Study study = editor.document().study();
+        section.view().addCircuit();
+        settle(editor);
+        assertEquals(2, study.getLines().get(0).getCircuits().size());
+        assertEquals(2, study.getLoadCases().get(0).getLoads().size());
+        pump(() -> section.view().placeOf(study.getLines().get(0).getCircuits().get(1).getPhases().get(0)) != null);
+        assertTrue(section.view().select(study.getLines().get(0).getCircuits().get(1).getPhases().get(0)));
+        section.view().removeSelected();
+        settle(editor);
+        assertEquals(1, study.getLines().get(0).getCircuits().size());
+        assertEquals(1, study.getLoadCases().get(0).getLoads().size());
+    }
+
+    @Test
+    void brokenStudy_showsFindingsAndNoResults() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        Phase phase = editor.document().study().getLines().get(0).getCircuits().get(0).getPhases().get(1);
+        editor.document().set("Break", phase, spanfield.model.SpanfieldPackage.eINSTANCE.getPhase_Attachment(), "left");
+        pump(() -> editor.computation().outcome().state() == State.INVALID);
+        assertEquals("Circuit_PhasesOnDifferentAttachments", editor.computation().outcome().findings().get(0).rule());
+        assertTrue(editor.computation().outcome().profiles().isEmpty());
+        editor.document().commands().undo();
+        pump(() -> editor.computation().outcome().state() == State.DONE);
+    }
+
+    @Test
+    void exports_areWritten() throws IOException {
+        StudyEditor editor = openExample("hillside");
+        ProfilePage profile = showPage(editor, ProfilePage.class);
+        Path svg = folder.resolve("p.svg");
+        Path png = folder.resolve("p.png");
+        Path csv = folder.resolve("p.csv");
+        profile.exportTo(svg);
+        profile.exportTo(png);
+        profile.exportTo(csv);
+        assertTrue(Files.readString(svg).contains("Hillside double circuit"));
+        assertTrue(new ImageData(png.toString()).width > 1000);
+        assertTrue(Files.readString(csv).lines().count() > 200);
+        Path edges = folder.resolve("e.csv");
+        showPage(editor, EdgeTablePage.class).exportTo(edges);
+        assertTrue(Files.readString(edges).contains("Rating in wind"));
+    }
+
+    @Test
+    void changeOnDisk_isNoticed() throws Exception {
+        StudyEditor editor = openExample("heathland");
+        assertFalse(editor.document().changedOnDisk());
+        Path file = editor.document().path();
+        Files.writeString(file, Files.readString(file).replace("Heathland single circuit", "Changed elsewhere"));
+        assertTrue(editor.document().changedOnDisk());
+        editor.document().reload();
+        assertEquals("Changed elsewhere", editor.document().study().getName());
+        assertFalse(editor.document().changedOnDisk());
+    }
+
+    @Test
+    void sameFile_opensOnce() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        Studies.open(window, editor.document().path());
+        assertEquals(1, page.getEditorReferences().length);
+        assertEquals(StudyInput.of(editor.document().path()), editor.getEditorInput());
+        assertNotEquals(StudyInput.of(folder.resolve("other")), editor.getEditorInput());
+    }
+
+    @Test
+    void everyTemplate_isSoundOrSaysWhatIsMissing() {
+        for (StudyTemplate template : StudyTemplate.values()) {
+            Study study = template.create("T", 60, 110e3, 300);
+            long errors = spanfield.study.StudyCheck.check(study).stream().filter(f -> f.isError()).count();
+            assertEquals(template == StudyTemplate.EMPTY ? 3 : 0, errors, template.name());
+        }
+    }
+}
