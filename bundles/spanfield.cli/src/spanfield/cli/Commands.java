@@ -7,7 +7,10 @@ import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.function.Function;
@@ -58,27 +61,29 @@ final class Commands {
         List<Path> studies = args.operands().stream().map(study -> Args.path(study, "the study file")).toList();
         boolean csv = Settings.csv(args);
         Results results = new Results(terminal, cancellation, csv, args.path(Args.OUTPUT), studies);
-        StringBuilder out = new StringBuilder();
-        CsvWriter writer = csv ? CheckReport.csv(out) : null;
-        ExitCode code = ExitCode.DONE;
+        Map<Path, List<Finding>> findings = new LinkedHashMap<>();
         for (Path study : studies) {
             try {
-                List<Finding> findings = StudyCheck.check(Studies.load(study));
-                if (csv) {
-                    CheckReport.csv(study.toString(), findings, writer);
-                } else {
-                    out.append(out.length() > 0 ? "\n" : "").append(CheckReport.text(study.toString(), findings));
-                }
-                boolean sound = findings.stream().noneMatch(Finding::isError);
-                code = sound || code == ExitCode.FILE ? code : ExitCode.STUDY_HAS_ERRORS;
+                findings.put(study, StudyCheck.check(Studies.load(study)));
             } catch (CommandException unreadable) {
                 // The other studies are still worth checking.
                 Main.complain(terminal, unreadable.lines());
-                code = ExitCode.FILE;
             }
         }
-        results.write(text(out.toString()), List.of());
-        return code;
+        results.write(csv ? out -> checkCsv(findings, out) : text(checkText(findings)), List.of());
+        boolean sound = findings.values().stream().flatMap(List::stream).noneMatch(Finding::isError);
+        return findings.keySet().containsAll(studies) ? sound ? ExitCode.DONE : ExitCode.STUDY_HAS_ERRORS : ExitCode.FILE;
+    }
+
+    private static void checkCsv(Map<Path, List<Finding>> findings, Appendable out) {
+        CsvWriter writer = CheckReport.csv(out);
+        findings.forEach((study, found) -> CheckReport.csv(study.toString(), found, writer));
+    }
+
+    private static String checkText(Map<Path, List<Finding>> findings) {
+        List<String> texts = new ArrayList<>();
+        findings.forEach((study, found) -> texts.add(CheckReport.text(study.toString(), found)));
+        return String.join("\n", texts);
     }
 
     private ExitCode edges(Args args) {

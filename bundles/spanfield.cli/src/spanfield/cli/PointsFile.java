@@ -76,20 +76,16 @@ record PointsFile(List<FieldPoint> points, List<String> names, List<Integer> lin
     private record Header(Map<String, Integer> columns, Map<String, LengthUnit> units, int name, int count, List<String> ignored) {
 
         static Header of(CsvRecords.Row row, String source) {
+            requireCommas(row, source);
             Map<String, Integer> columns = new LinkedHashMap<>();
             Map<String, LengthUnit> units = new LinkedHashMap<>();
             List<String> ignored = new ArrayList<>();
             int name = -1;
-            if (row.fields().size() == 1 && row.fields().get(0).matches("(?s).*[;\t].*")) {
-                throw bad(source, row, "is not separated by commas; separate columns by commas, and write numbers with a decimal dot");
-            }
             for (int i = 0; i < row.fields().size(); i++) {
                 String title = row.fields().get(i).strip().toLowerCase(Locale.ROOT);
                 Optional<String> quantity = QUANTITIES.stream().filter(q -> title.equals(q) || title.startsWith(q + "_")).findFirst();
                 if (quantity.isPresent()) {
-                    if (columns.put(quantity.get(), i) != null) {
-                        throw bad(source, row, "has two columns for the " + quantity.get() + "; keep one");
-                    }
+                    refuseSecond(columns.put(quantity.get(), i), quantity.get(), row, source);
                     units.put(quantity.get(), unit(quantity.get(), title, row, source));
                 } else if (title.equals("name") || title.equals("point")) {
                     name = i;
@@ -99,6 +95,18 @@ record PointsFile(List<FieldPoint> points, List<String> names, List<Integer> lin
             }
             requireAll(columns, row, source);
             return new Header(columns, units, name, row.fields().size(), ignored);
+        }
+
+        private static void requireCommas(CsvRecords.Row row, String source) {
+            if (row.fields().size() == 1 && row.fields().get(0).matches("(?s).*[;\t].*")) {
+                throw bad(source, row, "is not separated by commas; separate columns by commas, and write numbers with a decimal dot");
+            }
+        }
+
+        private static void refuseSecond(Integer first, String quantity, CsvRecords.Row row, String source) {
+            if (first != null) {
+                throw bad(source, row, "has two columns for the " + quantity + "; keep one");
+            }
         }
 
         private static LengthUnit unit(String quantity, String title, CsvRecords.Row row, String source) {
