@@ -18,7 +18,7 @@ elif command -v mvn >/dev/null 2>&1; then
     echo "spanfield: Maven is older than 3.9; fetching Maven $maven_version into .mvn-cache" >&2
     # In an empty folder: without a pom this goal leaves a marker folder behind, and the marker turns a later run into a no-op.
     scratch=$(mktemp -d)
-    (cd "$scratch" && mvn -B -q org.apache.maven.plugins:maven-dependency-plugin:3.8.1:unpack \
+    (cd "$scratch" && mvn -B -q -Dstyle.color=never org.apache.maven.plugins:maven-dependency-plugin:3.8.1:unpack \
       "-Dartifact=org.apache.maven:apache-maven:$maven_version:zip:bin" "-DoutputDirectory=$root/.mvn-cache") >&2
     rm -rf "$scratch"
     MVN=$cached_mvn

@@ -59,7 +59,7 @@ public interface LoadCase extends NamedElement {
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * <!-- begin-model-doc -->
-	 * Swing of all wires about their chords in degrees, positive to the right looking along the line.
+	 * Swing of all wires about their chords in degrees, positive to the right, seen along increasing station.
 	 * <!-- end-model-doc -->
 	 * @return the value of the '<em>Wind Swing Degrees</em>' attribute.
 	 * @see #setWindSwingDegrees(double)
