@@ -21,7 +21,9 @@ import org.eclipse.ui.actions.ActionFactory.IWorkbenchAction;
 import org.eclipse.ui.actions.ContributionItemFactory;
 import org.eclipse.ui.application.ActionBarAdvisor;
 import org.eclipse.ui.application.IActionBarConfigurer;
+import org.eclipse.ui.cheatsheets.OpenCheatSheetAction;
 import spanfield.ui.common.RecentStudies;
+import spanfield.ui.common.StudyEditor;
 
 /** Menus and tool bar: the platform's own actions where it has them. */
 final class MenuAdvisor extends ActionBarAdvisor {
@@ -30,6 +32,8 @@ final class MenuAdvisor extends ActionBarAdvisor {
     private Action create;
     private Action open;
     private Action start;
+    private Action guide;
+    private Action firstStudy;
     private IWorkbenchAction save;
     private IWorkbenchAction saveAs;
     private IWorkbenchAction saveAll;
@@ -56,6 +60,8 @@ final class MenuAdvisor extends ActionBarAdvisor {
                 throw new IllegalStateException(impossible);
             }
         });
+        guide = action("Guide", SWT.F1, null, this::openGuide);
+        firstStudy = action("A first study, step by step", 0, null, () -> new OpenCheatSheetAction("spanfield.app.firstStudy").run());
         save = platform(ActionFactory.SAVE);
         saveAs = platform(ActionFactory.SAVE_AS);
         saveAll = platform(ActionFactory.SAVE_ALL);
@@ -64,6 +70,18 @@ final class MenuAdvisor extends ActionBarAdvisor {
         undo = platform(ActionFactory.UNDO);
         redo = platform(ActionFactory.REDO);
         about = platform(ActionFactory.ABOUT);
+    }
+
+    /** Opens the guide at the page that is in use. */
+    private void openGuide() {
+        try {
+            GuideView view = (GuideView) window.getActivePage().showView(GuideView.ID);
+            if (window.getActivePage().getActiveEditor() instanceof StudyEditor editor) {
+                view.show(editor.activePageName());
+            }
+        } catch (PartInitException impossible) {
+            throw new IllegalStateException(impossible);
+        }
     }
 
     private IWorkbenchAction platform(ActionFactory factory) {
@@ -113,6 +131,8 @@ final class MenuAdvisor extends ActionBarAdvisor {
         views.add(show);
         MenuManager help = new MenuManager("&Help", IWorkbenchActionConstants.M_HELP);
         help.add(start);
+        help.add(guide);
+        help.add(firstStudy);
         help.add(new Separator(IWorkbenchActionConstants.MB_ADDITIONS));
         help.add(about);
         bar.add(file);

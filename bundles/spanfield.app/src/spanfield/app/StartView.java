@@ -2,6 +2,7 @@
 package spanfield.app;
 
 import java.nio.file.Path;
+import org.eclipse.jface.layout.GridDataFactory;
 import org.eclipse.jface.layout.GridLayoutFactory;
 import org.eclipse.jface.resource.JFaceResources;
 import org.eclipse.jface.wizard.WizardDialog;
@@ -19,6 +20,8 @@ public final class StartView extends ViewPart {
 
     static final String ID = "spanfield.app.start";
     private static final int MOST_RECENT = 5;
+    /** Width that texts ask for; they wrap at the width they get. */
+    private static final int TEXT_WIDTH = 420;
 
     private Composite content;
 
@@ -33,6 +36,7 @@ public final class StartView extends ViewPart {
         heading("Make the edge table");
         text("Type the loads on the page Loads, then read the page Edge table: both edges, the greatest value within, the errors, and the margin to each "
             + "limit. The page Profile shows the curves and exports them.");
+        link("<a>A first study, step by step</a>", () -> new org.eclipse.ui.cheatsheets.OpenCheatSheetAction("spanfield.app.firstStudy").run());
         heading("Go on with a recent study");
         int shown = 0;
         for (Path path : RecentStudies.list()) {
@@ -47,7 +51,7 @@ public final class StartView extends ViewPart {
         scroll.setContent(content);
         scroll.setExpandHorizontal(true);
         scroll.setExpandVertical(true);
-        scroll.setMinSize(content.computeSize(SWT.DEFAULT, SWT.DEFAULT));
+        scroll.addListener(SWT.Resize, event -> scroll.setMinSize(content.computeSize(scroll.getClientArea().width, SWT.DEFAULT)));
     }
 
     private IWorkbenchWindow window() {
@@ -65,12 +69,15 @@ public final class StartView extends ViewPart {
     }
 
     private void text(String text) {
-        new Label(content, SWT.NONE).setText(text);
+        Label label = new Label(content, SWT.WRAP);
+        label.setText(text);
+        GridDataFactory.fillDefaults().grab(true, false).hint(TEXT_WIDTH, SWT.DEFAULT).applyTo(label);
     }
 
     private void link(String text, Runnable... actions) {
-        Link link = new Link(content, SWT.NONE);
+        Link link = new Link(content, SWT.WRAP);
         link.setText(text);
+        GridDataFactory.fillDefaults().grab(true, false).hint(TEXT_WIDTH, SWT.DEFAULT).applyTo(link);
         link.addListener(SWT.Selection, event -> {
             int which = actions.length > 1 && event.text.startsWith("open") ? 1 : 0;
             actions[which].run();

@@ -30,6 +30,7 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import spanfield.app.GuideView;
 import spanfield.app.Studies;
 import spanfield.app.StudyTemplate;
 import spanfield.model.Attachment;
@@ -270,6 +271,38 @@ class WorkbenchTest {
         assertTrue(editor.computation().outcome().profiles().isEmpty());
         editor.document().commands().undo();
         pump(() -> editor.computation().outcome().state() == State.DONE);
+    }
+
+    @Test
+    void quickFix_mendsTheStudyAndCanBeUndone() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        Study study = editor.document().study();
+        editor.document().set("Break", study.getCorridor().getEdges().get(0), spanfield.model.SpanfieldPackage.eINSTANCE.getEdgePoint_LeftOffsetMetres(), 40.0);
+        pump(() -> editor.computation().outcome().state() == State.INVALID);
+        var finding = editor.computation().outcome().findings().get(0);
+        assertEquals("Corridor_EdgesInOrder", finding.rule());
+        var fixes = spanfield.ui.common.internal.QuickFixes.of(finding, editor.document());
+        assertEquals(java.util.Set.of("Exchange the edges"), fixes.keySet());
+        editor.document().execute(fixes.get("Exchange the edges"));
+        pump(() -> editor.computation().outcome().state() == State.DONE);
+        assertEquals(22, study.getCorridor().getEdges().get(0).getLeftOffsetMetres(), 0);
+        assertEquals(40, study.getCorridor().getEdges().get(0).getRightOffsetMetres(), 0);
+        editor.document().commands().undo();
+        assertEquals(40, study.getCorridor().getEdges().get(0).getLeftOffsetMetres(), 0);
+    }
+
+    @Test
+    void guide_hasATopicForEveryPageAndOpensThere() throws Exception {
+        StudyEditor editor = openExample("heathland");
+        GuideView guide = (GuideView) page.showView("spanfield.app.guide");
+        for (int i = 0; i < editor.pages().size(); i++) {
+            editor.showPage(i);
+            assertTrue(guide.titles().contains(editor.activePageName()), "topic of " + editor.activePageName());
+        }
+        guide.show("Edge table");
+        settle(editor);
+        picture("Guide");
+        page.hideView(guide);
     }
 
     @Test

@@ -190,7 +190,8 @@ public final class ProfileCanvas extends Canvas {
             if (limit.measure() == measure && y >= plot.y && y <= plot.y + plot.height) {
                 gc.drawLine(plot.x, y, plot.x + plot.width, y);
                 String text = limit.name() + " " + Numbers.stated(level) + " " + units.field().symbol();
-                gc.drawText(text, plot.x + plot.width - gc.textExtent(text).x - 4, y - line - 1, true);
+                // below the line where the labels of the edges stand above it
+                gc.drawText(text, plot.x + plot.width - gc.textExtent(text).x - 4, y < plot.y + 2 * line + 4 ? y + 1 : y - line - 1, true);
             }
         }
         gc.setLineStyle(SWT.LINE_SOLID);

@@ -234,6 +234,11 @@ public final class StudyEditor extends MultiPageEditorPart {
         return List.copyOf(studyPages);
     }
 
+    /** Name on the tab of the page in front, or empty. */
+    public String activePageName() {
+        return getActivePage() < 0 ? "" : getPageText(getActivePage());
+    }
+
     /** Brings a page to the front by its position. */
     public void showPage(int index) {
         setActivePage(index);

@@ -3,6 +3,10 @@ package spanfield.ui.common.internal;
 
 import java.util.List;
 import java.util.function.Consumer;
+import org.eclipse.jface.action.Action;
+import org.eclipse.jface.action.IMenuManager;
+import org.eclipse.jface.action.MenuManager;
+import org.eclipse.jface.action.Separator;
 import org.eclipse.jface.layout.TableColumnLayout;
 import org.eclipse.jface.viewers.ArrayContentProvider;
 import org.eclipse.jface.viewers.ColumnLabelProvider;
@@ -22,7 +26,7 @@ import spanfield.model.validation.Severity;
 import spanfield.ui.common.StudyComputation;
 import spanfield.ui.common.StudyEditor;
 
-/** Everything that the checks have found in the active study; a double click goes to the object. */
+/** Everything that the checks have found in the active study; a double click goes to the object, the context menu offers safe fixes. */
 public final class FindingsView extends ViewPart {
 
     private final Consumer<StudyComputation.Outcome> results = outcome -> show(outcome.findings());
@@ -50,12 +54,36 @@ public final class FindingsView extends ViewPart {
                 editor.reveal(finding.object());
             }
         });
+        MenuManager menu = new MenuManager();
+        menu.setRemoveAllWhenShown(true);
+        menu.addMenuListener(this::fillMenu);
+        viewer.getControl().setMenu(menu.createContextMenu(viewer.getControl()));
         getSite().getPage().addPartListener(parts);
         if (getSite().getPage().getActiveEditor() instanceof StudyEditor open) {
             follow(open);
         } else {
             show(List.of());
         }
+    }
+
+    private void fillMenu(IMenuManager menu) {
+        if (!(viewer.getStructuredSelection().getFirstElement() instanceof Finding finding) || editor == null) {
+            return;
+        }
+        if (finding.object() != null) {
+            menu.add(action("Go to the object", () -> editor.reveal(finding.object())));
+            menu.add(new Separator());
+            QuickFixes.of(finding, editor.document()).forEach((text, command) -> menu.add(action(text, () -> editor.document().execute(command))));
+        }
+    }
+
+    private static Action action(String text, Runnable run) {
+        return new Action(text) {
+            @Override
+            public void run() {
+                run.run();
+            }
+        };
     }
 
     private void column(TableColumnLayout layout, String title, int weight, java.util.function.Function<Finding, String> text, boolean image) {
