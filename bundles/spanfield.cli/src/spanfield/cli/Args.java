@@ -31,6 +31,7 @@ final class Args {
     static final Option FORMAT = option("format", "text|csv", "output for people or for programs (text unless given)");
     static final Option OUTPUT = option("output", "FILE", "write to this file instead of standard output; written whole or not at all");
     static final Option SVG = option("svg", "FILE", "also draw the profile as SVG");
+    static final Option PDF = option("pdf", "FILE", "also draw the profile as PDF");
     static final Option PNG = option("png", "FILE", "also draw the profile as PNG");
     static final Option WIDTH = option("width", "PIXELS", "width of the PNG, 320 to 10000 (1600 unless given)");
     static final Option AT = option("at", "FILE",

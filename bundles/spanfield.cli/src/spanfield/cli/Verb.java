@@ -18,7 +18,7 @@ enum Verb {
             "spanfield edges line.spanfield --format csv --output edges.csv")),
 
     PROFILE("profile", "STUDY", "lateral profile at a station, as a table and as a plot",
-        join(List.of(Args.STATION, Args.SVG, Args.PNG, Args.WIDTH), Args.COMPUTING),
+        join(List.of(Args.STATION, Args.SVG, Args.PDF, Args.PNG, Args.WIDTH), Args.COMPUTING),
         List.of("spanfield profile line.spanfield", "spanfield profile line.spanfield --station 'Mid-span 2-3' --png profile.png",
             "spanfield profile line.spanfield --station 175 --format csv --output profile.csv --svg profile.svg")),
 

@@ -28,7 +28,7 @@ class HelpTest {
 
     /** Options that each verb is documented to have, besides those of all computing verbs. */
     private static final Map<String, List<String>> OPTIONS = Map.of("check", List.of(), "edges", List.of("--station"),
-        "profile", List.of("--station", "--svg", "--png", "--width"), "points", List.of("--at"));
+        "profile", List.of("--station", "--svg", "--pdf", "--png", "--width"), "points", List.of("--at"));
 
     @TempDir
     private Path folder;

@@ -73,9 +73,11 @@ class ProfileTest {
     void pictures_areWrittenBesideTheTable() throws IOException {
         Path svg = folder.resolve("p.svg");
         Path png = folder.resolve("p.png");
+        Path pdf = folder.resolve("p.pdf");
         Path csv = folder.resolve("p.csv");
-        Cli.run("profile", StudyOnDisk.sound(folder), "--station", "Mid-span", "--format", "csv", "--output", csv, "--svg", svg, "--png", png, "--width",
-            "800", "--units", "mG").done();
+        Cli.run("profile", StudyOnDisk.sound(folder), "--station", "Mid-span", "--format", "csv", "--output", csv, "--svg", svg, "--pdf", pdf, "--png", png,
+            "--width", "800", "--units", "mG").done();
+        assertTrue(Files.readString(pdf, java.nio.charset.StandardCharsets.ISO_8859_1).startsWith("%PDF-"));
         String drawing = Files.readString(svg);
         for (String part : List.of("Left edge \u221220 m", "Right edge 20 m", "Edge limit: 20 mG", "Rating:", "Peak:", "Typical:", "mG RMS")) {
             assertTrue(drawing.contains(part), part);

@@ -88,6 +88,51 @@ class ProfilePlotTest {
         return strokes;
     }
 
+    /** The PDF is opened again and drawn: one page in the proportions of the plot, with the same ink at the same places as the PNG. */
+    @Test
+    void pdf_isOnePageThatLooksLikeThePng() throws Exception {
+        ProfilePlot plot = new ProfilePlot(ResultFixtures.profile(EDGE_LIMIT), PlotOptions.DEFAULT);
+        ByteArrayOutputStream pdf = new ByteArrayOutputStream();
+        plot.pdf(pdf);
+        ByteArrayOutputStream png = new ByteArrayOutputStream();
+        plot.png(png, ProfilePlot.WIDTH);
+        java.awt.image.BufferedImage expected = ImageIO.read(new ByteArrayInputStream(png.toByteArray()));
+        try (org.apache.pdfbox.pdmodel.PDDocument document = org.apache.pdfbox.Loader.loadPDF(pdf.toByteArray())) {
+            assertEquals(1, document.getNumberOfPages());
+            float scale = expected.getWidth() / document.getPage(0).getMediaBox().getWidth();
+            java.awt.image.BufferedImage drawn = new org.apache.pdfbox.rendering.PDFRenderer(document).renderImage(0, scale);
+            assertEquals(expected.getWidth(), drawn.getWidth(), 1);
+            assertEquals(expected.getHeight(), drawn.getHeight(), 1);
+            int cells = 0;
+            int alike = 0;
+            for (int x = 0; x + 20 < drawn.getWidth() && x + 20 < expected.getWidth(); x += 20) {
+                for (int y = 0; y + 20 < drawn.getHeight() && y + 20 < expected.getHeight(); y += 20) {
+                    cells++;
+                    alike += Math.abs(ink(expected, x, y) - ink(drawn, x, y)) < INK_TOLERANCE ? 1 : 0;
+                }
+            }
+            assertTrue(alike > 0.97 * cells, alike + " of " + cells + " cells look alike");
+        }
+        ByteArrayOutputStream again = new ByteArrayOutputStream();
+        new ProfilePlot(ResultFixtures.profile(EDGE_LIMIT), PlotOptions.DEFAULT).pdf(again);
+        assertEquals(pdf.size(), again.size());
+        org.junit.jupiter.api.Assertions.assertArrayEquals(pdf.toByteArray(), again.toByteArray(), "the same plot is the same file");
+    }
+
+    /** Difference of mean darkness of a cell of 20 by 20 pixels, 0 to 1: anti-aliasing and hinting of texts differ between the two. */
+    private static final double INK_TOLERANCE = 0.06;
+
+    private static double ink(java.awt.image.BufferedImage image, int x, int y) {
+        double sum = 0;
+        for (int i = 0; i < 20; i++) {
+            for (int j = 0; j < 20; j++) {
+                java.awt.Color color = new java.awt.Color(image.getRGB(x + i, y + j));
+                sum += 1 - (color.getRed() + color.getGreen() + color.getBlue()) / 765.0;
+            }
+        }
+        return sum / 400;
+    }
+
     @Test
     void svg_labelsEdgesLimitsAxesAndLoadCases() throws Exception {
         List<String> texts = texts(parse(svg(ResultFixtures.profile(EDGE_LIMIT, HIGH_LIMIT, MAJOR_LIMIT), PlotOptions.DEFAULT)));

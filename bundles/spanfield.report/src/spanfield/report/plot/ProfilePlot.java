@@ -33,10 +33,12 @@ public final class ProfilePlot {
     public static final int GREATEST_WIDTH_PIXELS = 10_000;
 
     private final JFreeChart chart;
+    private final String title;
     private final int height;
 
     /** A plot of a profile; nothing is drawn yet. */
     public ProfilePlot(LateralProfile profile, PlotOptions options) {
+        title = profile.evidence().studyName();
         ProfileChart builder = new ProfileChart(profile, options);
         this.chart = builder.chart();
         this.height = builder.height();
@@ -83,6 +85,15 @@ public final class ProfilePlot {
         if (!ImageIO.write(image, "png", out)) {
             throw new IOException("the Java runtime has no writer for PNG");
         }
+    }
+
+    /**
+     * Writes the plot as a PDF of one page, with texts as outlines.
+     *
+     * @param out stays open
+     */
+    public void pdf(OutputStream out) throws IOException {
+        PdfPage.write(WIDTH, height, title, graphics -> chart.draw(graphics, new Rectangle2D.Double(0, 0, WIDTH, height)), out);
     }
 
     /** Writes an SVG 1.1 in UTF-8. */

@@ -191,8 +191,8 @@ public final class ProfilePage extends StudyPage {
             return;
         }
         FileDialog dialog = new FileDialog(canvas.getShell(), SWT.SAVE);
-        dialog.setFilterExtensions(new String[] {"*.svg", "*.png", "*.csv"});
-        dialog.setFilterNames(new String[] {"Drawing (SVG)", "Picture (PNG)", "Table (CSV)"});
+        dialog.setFilterExtensions(new String[] {"*.svg", "*.png", "*.pdf", "*.csv"});
+        dialog.setFilterNames(new String[] {"Drawing (SVG)", "Picture (PNG)", "Document (PDF)", "Table (CSV)"});
         dialog.setFileName("profile.svg");
         dialog.setOverwrite(true);
         String chosen = dialog.open();
@@ -216,12 +216,14 @@ public final class ProfilePage extends StudyPage {
             new ProfilePlot(shown, new PlotOptions(units(), measure())).svg(out);
         } else if (name.endsWith(".png")) {
             new ProfilePlot(shown, new PlotOptions(units(), measure())).png(out, PICTURE_WIDTH);
+        } else if (name.endsWith(".pdf")) {
+            new ProfilePlot(shown, new PlotOptions(units(), measure())).pdf(out);
         } else if (name.endsWith(".csv")) {
             StringBuilder text = new StringBuilder();
             ProfileReport.csv(shown, units(), text);
             out.write(text.toString().getBytes(StandardCharsets.UTF_8));
         } else {
-            throw new IllegalArgumentException("end the name with .svg, .png or .csv");
+            throw new IllegalArgumentException("end the name with .svg, .png, .pdf or .csv");
         }
         return out.toByteArray();
     }

@@ -35,7 +35,7 @@ class DependencyRulesTest {
         "spanfield.model.edit", Set.of("spanfield.model", "org.eclipse.emf.edit", "org.eclipse.core.runtime"),
         "spanfield.solver", Set.of("org.apache.commons.math3"),
         "spanfield.study", Set.of("spanfield.model", "spanfield.solver", "org.apache.commons.math3"),
-        "spanfield.report", Set.of("spanfield.model", "spanfield.study", "spanfield.solver", "org.jfree", "org.apache.batik", "org.apache.xmlgraphics",
+        "spanfield.report", Set.of("spanfield.model", "spanfield.study", "spanfield.solver", "org.jfree", "org.apache.batik", "org.apache.xmlgraphics", "org.apache.pdfbox", "de.rototor.pdfbox",
             "org.apache.commons.math3"),
         "spanfield.cli", Set.of("spanfield.model", "spanfield.study", "spanfield.solver", "spanfield.report", "org.eclipse.equinox.app", "org.eclipse.equinox.common",
             "org.eclipse.core.runtime", "org.apache.commons.cli", "picocli", "info.picocli"));
