@@ -293,6 +293,24 @@ public interface SpanfieldFactory extends EFactory {
 	FieldLimit createFieldLimit();
 
 	/**
+	 * Returns a new object of class '<em>Survey</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Survey</em>'.
+	 * @generated
+	 */
+	Survey createSurvey();
+
+	/**
+	 * Returns a new object of class '<em>Survey Reading</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Survey Reading</em>'.
+	 * @generated
+	 */
+	SurveyReading createSurveyReading();
+
+	/**
 	 * Returns the package supported by this factory.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->

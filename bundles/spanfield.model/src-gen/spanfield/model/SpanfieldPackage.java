@@ -298,13 +298,22 @@ public interface SpanfieldPackage extends EPackage {
 	int STUDY__LIMITS = NAMED_ELEMENT_FEATURE_COUNT + 15;
 
 	/**
+	 * The feature id for the '<em><b>Surveys</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int STUDY__SURVEYS = NAMED_ELEMENT_FEATURE_COUNT + 16;
+
+	/**
 	 * The number of structural features of the '<em>Study</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int STUDY_FEATURE_COUNT = NAMED_ELEMENT_FEATURE_COUNT + 16;
+	int STUDY_FEATURE_COUNT = NAMED_ELEMENT_FEATURE_COUNT + 17;
 
 	/**
 	 * The number of operations of the '<em>Study</em>' class.
@@ -2517,6 +2526,161 @@ public interface SpanfieldPackage extends EPackage {
 	int FIELD_LIMIT_OPERATION_COUNT = NAMED_ELEMENT_OPERATION_COUNT + 0;
 
 	/**
+	 * The meta object id for the '{@link spanfield.model.impl.SurveyImpl <em>Survey</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see spanfield.model.impl.SurveyImpl
+	 * @see spanfield.model.impl.SpanfieldPackageImpl#getSurvey()
+	 * @generated
+	 */
+	int SURVEY = 34;
+
+	/**
+	 * The feature id for the '<em><b>Id</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__ID = NAMED_ELEMENT__ID;
+
+	/**
+	 * The feature id for the '<em><b>Name</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__NAME = NAMED_ELEMENT__NAME;
+
+	/**
+	 * The feature id for the '<em><b>Notes</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__NOTES = NAMED_ELEMENT__NOTES;
+
+	/**
+	 * The feature id for the '<em><b>Date</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__DATE = NAMED_ELEMENT_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Instrument</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__INSTRUMENT = NAMED_ELEMENT_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Relative Uncertainty</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__RELATIVE_UNCERTAINTY = NAMED_ELEMENT_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>Readings</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY__READINGS = NAMED_ELEMENT_FEATURE_COUNT + 3;
+
+	/**
+	 * The number of structural features of the '<em>Survey</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_FEATURE_COUNT = NAMED_ELEMENT_FEATURE_COUNT + 4;
+
+	/**
+	 * The number of operations of the '<em>Survey</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_OPERATION_COUNT = NAMED_ELEMENT_OPERATION_COUNT + 0;
+
+	/**
+	 * The meta object id for the '{@link spanfield.model.impl.SurveyReadingImpl <em>Survey Reading</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see spanfield.model.impl.SurveyReadingImpl
+	 * @see spanfield.model.impl.SpanfieldPackageImpl#getSurveyReading()
+	 * @generated
+	 */
+	int SURVEY_READING = 35;
+
+	/**
+	 * The feature id for the '<em><b>Station Metres</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING__STATION_METRES = 0;
+
+	/**
+	 * The feature id for the '<em><b>Offset Metres</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING__OFFSET_METRES = 1;
+
+	/**
+	 * The feature id for the '<em><b>Height Metres</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING__HEIGHT_METRES = 2;
+
+	/**
+	 * The feature id for the '<em><b>Resultant Tesla</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING__RESULTANT_TESLA = 3;
+
+	/**
+	 * The number of structural features of the '<em>Survey Reading</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING_FEATURE_COUNT = 4;
+
+	/**
+	 * The number of operations of the '<em>Survey Reading</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SURVEY_READING_OPERATION_COUNT = 0;
+
+	/**
 	 * The meta object id for the '{@link spanfield.model.EarthModel <em>Earth Model</em>}' enum.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2524,7 +2688,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getEarthModel()
 	 * @generated
 	 */
-	int EARTH_MODEL = 34;
+	int EARTH_MODEL = 36;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.ImpedanceFormula <em>Impedance Formula</em>}' enum.
@@ -2534,7 +2698,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getImpedanceFormula()
 	 * @generated
 	 */
-	int IMPEDANCE_FORMULA = 35;
+	int IMPEDANCE_FORMULA = 37;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.AttachmentRole <em>Attachment Role</em>}' enum.
@@ -2544,7 +2708,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getAttachmentRole()
 	 * @generated
 	 */
-	int ATTACHMENT_ROLE = 36;
+	int ATTACHMENT_ROLE = 38;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.LineEnd <em>Line End</em>}' enum.
@@ -2554,7 +2718,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getLineEnd()
 	 * @generated
 	 */
-	int LINE_END = 37;
+	int LINE_END = 39;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.Bonding <em>Bonding</em>}' enum.
@@ -2564,7 +2728,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getBonding()
 	 * @generated
 	 */
-	int BONDING = 38;
+	int BONDING = 40;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.Phasing <em>Phasing</em>}' enum.
@@ -2574,7 +2738,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getPhasing()
 	 * @generated
 	 */
-	int PHASING = 39;
+	int PHASING = 41;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.FlowDirection <em>Flow Direction</em>}' enum.
@@ -2584,7 +2748,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getFlowDirection()
 	 * @generated
 	 */
-	int FLOW_DIRECTION = 40;
+	int FLOW_DIRECTION = 42;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.FieldQuantity <em>Field Quantity</em>}' enum.
@@ -2594,7 +2758,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getFieldQuantity()
 	 * @generated
 	 */
-	int FIELD_QUANTITY = 41;
+	int FIELD_QUANTITY = 43;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.FieldMeasure <em>Field Measure</em>}' enum.
@@ -2604,7 +2768,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getFieldMeasure()
 	 * @generated
 	 */
-	int FIELD_MEASURE = 42;
+	int FIELD_MEASURE = 44;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.LimitPlace <em>Limit Place</em>}' enum.
@@ -2614,7 +2778,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getLimitPlace()
 	 * @generated
 	 */
-	int LIMIT_PLACE = 43;
+	int LIMIT_PLACE = 45;
 
 	/**
 	 * The meta object id for the '{@link spanfield.model.LimitBasis <em>Limit Basis</em>}' enum.
@@ -2624,7 +2788,7 @@ public interface SpanfieldPackage extends EPackage {
 	 * @see spanfield.model.impl.SpanfieldPackageImpl#getLimitBasis()
 	 * @generated
 	 */
-	int LIMIT_BASIS = 44;
+	int LIMIT_BASIS = 46;
 
 
 	/**
@@ -2855,6 +3019,17 @@ public interface SpanfieldPackage extends EPackage {
 	 * @generated
 	 */
 	EReference getStudy_Limits();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link spanfield.model.Study#getSurveys <em>Surveys</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Surveys</em>'.
+	 * @see spanfield.model.Study#getSurveys()
+	 * @see #getStudy()
+	 * @generated
+	 */
+	EReference getStudy_Surveys();
 
 	/**
 	 * Returns the meta object for class '{@link spanfield.model.Corridor <em>Corridor</em>}'.
@@ -4332,6 +4507,114 @@ public interface SpanfieldPackage extends EPackage {
 	EAttribute getFieldLimit_Basis();
 
 	/**
+	 * Returns the meta object for class '{@link spanfield.model.Survey <em>Survey</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Survey</em>'.
+	 * @see spanfield.model.Survey
+	 * @generated
+	 */
+	EClass getSurvey();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.Survey#getDate <em>Date</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Date</em>'.
+	 * @see spanfield.model.Survey#getDate()
+	 * @see #getSurvey()
+	 * @generated
+	 */
+	EAttribute getSurvey_Date();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.Survey#getInstrument <em>Instrument</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Instrument</em>'.
+	 * @see spanfield.model.Survey#getInstrument()
+	 * @see #getSurvey()
+	 * @generated
+	 */
+	EAttribute getSurvey_Instrument();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.Survey#getRelativeUncertainty <em>Relative Uncertainty</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Relative Uncertainty</em>'.
+	 * @see spanfield.model.Survey#getRelativeUncertainty()
+	 * @see #getSurvey()
+	 * @generated
+	 */
+	EAttribute getSurvey_RelativeUncertainty();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link spanfield.model.Survey#getReadings <em>Readings</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Readings</em>'.
+	 * @see spanfield.model.Survey#getReadings()
+	 * @see #getSurvey()
+	 * @generated
+	 */
+	EReference getSurvey_Readings();
+
+	/**
+	 * Returns the meta object for class '{@link spanfield.model.SurveyReading <em>Survey Reading</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Survey Reading</em>'.
+	 * @see spanfield.model.SurveyReading
+	 * @generated
+	 */
+	EClass getSurveyReading();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.SurveyReading#getStationMetres <em>Station Metres</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Station Metres</em>'.
+	 * @see spanfield.model.SurveyReading#getStationMetres()
+	 * @see #getSurveyReading()
+	 * @generated
+	 */
+	EAttribute getSurveyReading_StationMetres();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.SurveyReading#getOffsetMetres <em>Offset Metres</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Offset Metres</em>'.
+	 * @see spanfield.model.SurveyReading#getOffsetMetres()
+	 * @see #getSurveyReading()
+	 * @generated
+	 */
+	EAttribute getSurveyReading_OffsetMetres();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.SurveyReading#getHeightMetres <em>Height Metres</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Height Metres</em>'.
+	 * @see spanfield.model.SurveyReading#getHeightMetres()
+	 * @see #getSurveyReading()
+	 * @generated
+	 */
+	EAttribute getSurveyReading_HeightMetres();
+
+	/**
+	 * Returns the meta object for the attribute '{@link spanfield.model.SurveyReading#getResultantTesla <em>Resultant Tesla</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Resultant Tesla</em>'.
+	 * @see spanfield.model.SurveyReading#getResultantTesla()
+	 * @see #getSurveyReading()
+	 * @generated
+	 */
+	EAttribute getSurveyReading_ResultantTesla();
+
+	/**
 	 * Returns the meta object for enum '{@link spanfield.model.EarthModel <em>Earth Model</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -4635,6 +4918,14 @@ public interface SpanfieldPackage extends EPackage {
 		 * @generated
 		 */
 		EReference STUDY__LIMITS = eINSTANCE.getStudy_Limits();
+
+		/**
+		 * The meta object literal for the '<em><b>Surveys</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference STUDY__SURVEYS = eINSTANCE.getStudy_Surveys();
 
 		/**
 		 * The meta object literal for the '{@link spanfield.model.impl.CorridorImpl <em>Corridor</em>}' class.
@@ -5795,6 +6086,90 @@ public interface SpanfieldPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute FIELD_LIMIT__BASIS = eINSTANCE.getFieldLimit_Basis();
+
+		/**
+		 * The meta object literal for the '{@link spanfield.model.impl.SurveyImpl <em>Survey</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see spanfield.model.impl.SurveyImpl
+		 * @see spanfield.model.impl.SpanfieldPackageImpl#getSurvey()
+		 * @generated
+		 */
+		EClass SURVEY = eINSTANCE.getSurvey();
+
+		/**
+		 * The meta object literal for the '<em><b>Date</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY__DATE = eINSTANCE.getSurvey_Date();
+
+		/**
+		 * The meta object literal for the '<em><b>Instrument</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY__INSTRUMENT = eINSTANCE.getSurvey_Instrument();
+
+		/**
+		 * The meta object literal for the '<em><b>Relative Uncertainty</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY__RELATIVE_UNCERTAINTY = eINSTANCE.getSurvey_RelativeUncertainty();
+
+		/**
+		 * The meta object literal for the '<em><b>Readings</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference SURVEY__READINGS = eINSTANCE.getSurvey_Readings();
+
+		/**
+		 * The meta object literal for the '{@link spanfield.model.impl.SurveyReadingImpl <em>Survey Reading</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see spanfield.model.impl.SurveyReadingImpl
+		 * @see spanfield.model.impl.SpanfieldPackageImpl#getSurveyReading()
+		 * @generated
+		 */
+		EClass SURVEY_READING = eINSTANCE.getSurveyReading();
+
+		/**
+		 * The meta object literal for the '<em><b>Station Metres</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY_READING__STATION_METRES = eINSTANCE.getSurveyReading_StationMetres();
+
+		/**
+		 * The meta object literal for the '<em><b>Offset Metres</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY_READING__OFFSET_METRES = eINSTANCE.getSurveyReading_OffsetMetres();
+
+		/**
+		 * The meta object literal for the '<em><b>Height Metres</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY_READING__HEIGHT_METRES = eINSTANCE.getSurveyReading_HeightMetres();
+
+		/**
+		 * The meta object literal for the '<em><b>Resultant Tesla</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SURVEY_READING__RESULTANT_TESLA = eINSTANCE.getSurveyReading_ResultantTesla();
 
 		/**
 		 * The meta object literal for the '{@link spanfield.model.EarthModel <em>Earth Model</em>}' enum.

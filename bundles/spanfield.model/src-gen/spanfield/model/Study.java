@@ -34,6 +34,7 @@ import org.eclipse.emf.common.util.EList;
  *   <li>{@link spanfield.model.Study#getLoadCases <em>Load Cases</em>}</li>
  *   <li>{@link spanfield.model.Study#getStations <em>Stations</em>}</li>
  *   <li>{@link spanfield.model.Study#getLimits <em>Limits</em>}</li>
+ *   <li>{@link spanfield.model.Study#getSurveys <em>Surveys</em>}</li>
  * </ul>
  *
  * @see spanfield.model.SpanfieldPackage#getStudy()
@@ -391,5 +392,20 @@ public interface Study extends NamedElement {
 	 * @generated
 	 */
 	EList<FieldLimit> getLimits();
+
+	/**
+	 * Returns the value of the '<em><b>Surveys</b></em>' containment reference list.
+	 * The list contents are of type {@link spanfield.model.Survey}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Measured surveys of the field.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Surveys</em>' containment reference list.
+	 * @see spanfield.model.SpanfieldPackage#getStudy_Surveys()
+	 * @model containment="true"
+	 * @generated
+	 */
+	EList<Survey> getSurveys();
 
 } // Study

@@ -317,10 +317,29 @@ class WorkbenchTest {
         profile.exportTo(csv);
         assertTrue(Files.readString(svg).contains("Hillside double circuit"));
         assertTrue(new ImageData(png.toString()).width > 1000);
+        Path pdf = folder.resolve("p.pdf");
+        profile.exportTo(pdf);
+        assertTrue(Files.readString(pdf, StandardCharsets.ISO_8859_1).startsWith("%PDF-"));
         assertTrue(Files.readString(csv).lines().count() > 200);
         Path edges = folder.resolve("e.csv");
         showPage(editor, EdgeTablePage.class).exportTo(edges);
         assertTrue(Files.readString(edges).contains("Rating in wind"));
+    }
+
+    @Test
+    void importedSurvey_isPartOfTheStudyAndDrawn() throws IOException {
+        StudyEditor editor = openExample("heathland");
+        ProfilePage profile = showPage(editor, ProfilePage.class);
+        Path file = folder.resolve("walk.csv");
+        Files.writeString(file, "station_m,offset_m,height_m,resultant_uT\n100,-20,1,2.1\n100,-10,1,5.6\n100,0,1,10.2\n100,10,1,5.9\n300,0,1,4\n");
+        profile.importSurvey(file);
+        settle(editor);
+        assertEquals(5, editor.document().study().getSurveys().get(0).getReadings().size());
+        assertEquals("walk", editor.document().study().getSurveys().get(0).getName());
+        assertEquals(State.DONE, editor.computation().outcome().state());
+        picture("ProfilePage-survey");
+        editor.document().commands().undo();
+        assertTrue(editor.document().study().getSurveys().isEmpty());
     }
 
     @Test

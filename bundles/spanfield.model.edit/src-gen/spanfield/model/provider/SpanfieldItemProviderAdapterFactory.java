@@ -763,6 +763,52 @@ public class SpanfieldItemProviderAdapterFactory extends SpanfieldAdapterFactory
 	}
 
 	/**
+	 * This keeps track of the one adapter used for all {@link spanfield.model.Survey} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected SurveyItemProvider surveyItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link spanfield.model.Survey}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createSurveyAdapter() {
+		if (surveyItemProvider == null) {
+			surveyItemProvider = new SurveyItemProvider(this);
+		}
+
+		return surveyItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link spanfield.model.SurveyReading} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected SurveyReadingItemProvider surveyReadingItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link spanfield.model.SurveyReading}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createSurveyReadingAdapter() {
+		if (surveyReadingItemProvider == null) {
+			surveyReadingItemProvider = new SurveyReadingItemProvider(this);
+		}
+
+		return surveyReadingItemProvider;
+	}
+
+	/**
 	 * This returns the root adapter factory that contains this factory.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -897,6 +943,8 @@ public class SpanfieldItemProviderAdapterFactory extends SpanfieldAdapterFactory
 		if (phasePhasorItemProvider != null) phasePhasorItemProvider.dispose();
 		if (profileStationItemProvider != null) profileStationItemProvider.dispose();
 		if (fieldLimitItemProvider != null) fieldLimitItemProvider.dispose();
+		if (surveyItemProvider != null) surveyItemProvider.dispose();
+		if (surveyReadingItemProvider != null) surveyReadingItemProvider.dispose();
 	}
 
 }

@@ -279,6 +279,7 @@ public class StudyItemProvider extends NamedElementItemProvider {
 			childrenFeatures.add(SpanfieldPackage.Literals.STUDY__LOAD_CASES);
 			childrenFeatures.add(SpanfieldPackage.Literals.STUDY__STATIONS);
 			childrenFeatures.add(SpanfieldPackage.Literals.STUDY__LIMITS);
+			childrenFeatures.add(SpanfieldPackage.Literals.STUDY__SURVEYS);
 		}
 		return childrenFeatures;
 	}
@@ -351,6 +352,7 @@ public class StudyItemProvider extends NamedElementItemProvider {
 			case SpanfieldPackage.STUDY__LOAD_CASES:
 			case SpanfieldPackage.STUDY__STATIONS:
 			case SpanfieldPackage.STUDY__LIMITS:
+			case SpanfieldPackage.STUDY__SURVEYS:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), true, false));
 				return;
 		}
@@ -402,6 +404,11 @@ public class StudyItemProvider extends NamedElementItemProvider {
 			(createChildParameter
 				(SpanfieldPackage.Literals.STUDY__LIMITS,
 				 SpanfieldFactory.eINSTANCE.createFieldLimit()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(SpanfieldPackage.Literals.STUDY__SURVEYS,
+				 SpanfieldFactory.eINSTANCE.createSurvey()));
 	}
 
 }

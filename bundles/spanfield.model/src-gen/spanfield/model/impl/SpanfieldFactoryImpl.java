@@ -88,6 +88,8 @@ public class SpanfieldFactoryImpl extends EFactoryImpl implements SpanfieldFacto
 			case SpanfieldPackage.PHASE_PHASOR: return createPhasePhasor();
 			case SpanfieldPackage.PROFILE_STATION: return createProfileStation();
 			case SpanfieldPackage.FIELD_LIMIT: return createFieldLimit();
+			case SpanfieldPackage.SURVEY: return createSurvey();
+			case SpanfieldPackage.SURVEY_READING: return createSurveyReading();
 			default:
 				throw new IllegalArgumentException("The class '" + eClass.getName() + "' is not a valid classifier");
 		}
@@ -491,6 +493,28 @@ public class SpanfieldFactoryImpl extends EFactoryImpl implements SpanfieldFacto
 	public FieldLimit createFieldLimit() {
 		FieldLimitImpl fieldLimit = new FieldLimitImpl();
 		return fieldLimit;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Survey createSurvey() {
+		SurveyImpl survey = new SurveyImpl();
+		return survey;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public SurveyReading createSurveyReading() {
+		SurveyReadingImpl surveyReading = new SurveyReadingImpl();
+		return surveyReading;
 	}
 
 	/**

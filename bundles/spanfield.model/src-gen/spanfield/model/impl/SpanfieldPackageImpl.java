@@ -56,6 +56,8 @@ import spanfield.model.Structure;
 import spanfield.model.StructureType;
 import spanfield.model.StrungElement;
 import spanfield.model.Study;
+import spanfield.model.Survey;
+import spanfield.model.SurveyReading;
 import spanfield.model.TensionStringing;
 import spanfield.model.WireStringing;
 
@@ -303,6 +305,20 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 	 * @generated
 	 */
 	private EClass fieldLimitEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass surveyEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass surveyReadingEClass = null;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -649,6 +665,16 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 	@Override
 	public EReference getStudy_Limits() {
 		return (EReference)studyEClass.getEStructuralFeatures().get(15);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getStudy_Surveys() {
+		return (EReference)studyEClass.getEStructuralFeatures().get(16);
 	}
 
 	/**
@@ -2027,6 +2053,106 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 	 * @generated
 	 */
 	@Override
+	public EClass getSurvey() {
+		return surveyEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurvey_Date() {
+		return (EAttribute)surveyEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurvey_Instrument() {
+		return (EAttribute)surveyEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurvey_RelativeUncertainty() {
+		return (EAttribute)surveyEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getSurvey_Readings() {
+		return (EReference)surveyEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getSurveyReading() {
+		return surveyReadingEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurveyReading_StationMetres() {
+		return (EAttribute)surveyReadingEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurveyReading_OffsetMetres() {
+		return (EAttribute)surveyReadingEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurveyReading_HeightMetres() {
+		return (EAttribute)surveyReadingEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSurveyReading_ResultantTesla() {
+		return (EAttribute)surveyReadingEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EEnum getEarthModel() {
 		return earthModelEEnum;
 	}
@@ -2182,6 +2308,7 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 		createEReference(studyEClass, STUDY__LOAD_CASES);
 		createEReference(studyEClass, STUDY__STATIONS);
 		createEReference(studyEClass, STUDY__LIMITS);
+		createEReference(studyEClass, STUDY__SURVEYS);
 
 		corridorEClass = createEClass(CORRIDOR);
 		createEAttribute(corridorEClass, CORRIDOR__CROSS_SLOPE);
@@ -2352,6 +2479,18 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 		createEAttribute(fieldLimitEClass, FIELD_LIMIT__LOAD_CONDITION);
 		createEAttribute(fieldLimitEClass, FIELD_LIMIT__BASIS);
 
+		surveyEClass = createEClass(SURVEY);
+		createEAttribute(surveyEClass, SURVEY__DATE);
+		createEAttribute(surveyEClass, SURVEY__INSTRUMENT);
+		createEAttribute(surveyEClass, SURVEY__RELATIVE_UNCERTAINTY);
+		createEReference(surveyEClass, SURVEY__READINGS);
+
+		surveyReadingEClass = createEClass(SURVEY_READING);
+		createEAttribute(surveyReadingEClass, SURVEY_READING__STATION_METRES);
+		createEAttribute(surveyReadingEClass, SURVEY_READING__OFFSET_METRES);
+		createEAttribute(surveyReadingEClass, SURVEY_READING__HEIGHT_METRES);
+		createEAttribute(surveyReadingEClass, SURVEY_READING__RESULTANT_TESLA);
+
 		// Create enums
 		earthModelEEnum = createEEnum(EARTH_MODEL);
 		impedanceFormulaEEnum = createEEnum(IMPEDANCE_FORMULA);
@@ -2413,6 +2552,7 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 		phasorLoadEClass.getESuperTypes().add(this.getCircuitLoad());
 		profileStationEClass.getESuperTypes().add(this.getNamedElement());
 		fieldLimitEClass.getESuperTypes().add(this.getNamedElement());
+		surveyEClass.getESuperTypes().add(this.getNamedElement());
 
 		// Initialize classes, features, and operations; add parameters
 		initEClass(namedElementEClass, NamedElement.class, "NamedElement", IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
@@ -2437,6 +2577,7 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 		initEReference(getStudy_LoadCases(), this.getLoadCase(), null, "loadCases", null, 0, -1, Study.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getStudy_Stations(), this.getProfileStation(), null, "stations", null, 0, -1, Study.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getStudy_Limits(), this.getFieldLimit(), null, "limits", null, 0, -1, Study.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getStudy_Surveys(), this.getSurvey(), null, "surveys", null, 0, -1, Study.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(corridorEClass, Corridor.class, "Corridor", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getCorridor_CrossSlope(), ecorePackage.getEDouble(), "crossSlope", "0", 0, 1, Corridor.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -2606,6 +2747,18 @@ public class SpanfieldPackageImpl extends EPackageImpl implements SpanfieldPacka
 		initEAttribute(getFieldLimit_Edition(), ecorePackage.getEString(), "edition", null, 0, 1, FieldLimit.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getFieldLimit_LoadCondition(), ecorePackage.getEString(), "loadCondition", null, 0, 1, FieldLimit.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getFieldLimit_Basis(), this.getLimitBasis(), "basis", "USER", 0, 1, FieldLimit.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(surveyEClass, Survey.class, "Survey", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getSurvey_Date(), ecorePackage.getEString(), "date", null, 0, 1, Survey.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSurvey_Instrument(), ecorePackage.getEString(), "instrument", null, 0, 1, Survey.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSurvey_RelativeUncertainty(), ecorePackage.getEDouble(), "relativeUncertainty", "0.05", 0, 1, Survey.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getSurvey_Readings(), this.getSurveyReading(), null, "readings", null, 0, -1, Survey.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(surveyReadingEClass, SurveyReading.class, "SurveyReading", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getSurveyReading_StationMetres(), ecorePackage.getEDouble(), "stationMetres", "0", 0, 1, SurveyReading.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSurveyReading_OffsetMetres(), ecorePackage.getEDouble(), "offsetMetres", "0", 0, 1, SurveyReading.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSurveyReading_HeightMetres(), ecorePackage.getEDouble(), "heightMetres", "1", 0, 1, SurveyReading.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSurveyReading_ResultantTesla(), ecorePackage.getEDouble(), "resultantTesla", "0", 0, 1, SurveyReading.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		// Initialize enums and add enum literals
 		initEEnum(earthModelEEnum, EarthModel.class, "EarthModel");

@@ -29,6 +29,7 @@ import spanfield.model.ProfileStation;
 import spanfield.model.SpanfieldPackage;
 import spanfield.model.StructureType;
 import spanfield.model.Study;
+import spanfield.model.Survey;
 
 /**
  * <!-- begin-user-doc -->
@@ -54,6 +55,7 @@ import spanfield.model.Study;
  *   <li>{@link spanfield.model.impl.StudyImpl#getLoadCases <em>Load Cases</em>}</li>
  *   <li>{@link spanfield.model.impl.StudyImpl#getStations <em>Stations</em>}</li>
  *   <li>{@link spanfield.model.impl.StudyImpl#getLimits <em>Limits</em>}</li>
+ *   <li>{@link spanfield.model.impl.StudyImpl#getSurveys <em>Surveys</em>}</li>
  * </ul>
  *
  * @generated
@@ -308,6 +310,16 @@ public class StudyImpl extends NamedElementImpl implements Study {
 	 * @ordered
 	 */
 	protected EList<FieldLimit> limits;
+
+	/**
+	 * The cached value of the '{@link #getSurveys() <em>Surveys</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getSurveys()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<Survey> surveys;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -664,6 +676,19 @@ public class StudyImpl extends NamedElementImpl implements Study {
 	 * @generated
 	 */
 	@Override
+	public EList<Survey> getSurveys() {
+		if (surveys == null) {
+			surveys = new EObjectContainmentEList<Survey>(Survey.class, this, SpanfieldPackage.STUDY__SURVEYS);
+		}
+		return surveys;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public NotificationChain eInverseRemove(InternalEObject otherEnd, int featureID, NotificationChain msgs) {
 		switch (featureID) {
 			case SpanfieldPackage.STUDY__CORRIDOR:
@@ -680,6 +705,8 @@ public class StudyImpl extends NamedElementImpl implements Study {
 				return ((InternalEList<?>)getStations()).basicRemove(otherEnd, msgs);
 			case SpanfieldPackage.STUDY__LIMITS:
 				return ((InternalEList<?>)getLimits()).basicRemove(otherEnd, msgs);
+			case SpanfieldPackage.STUDY__SURVEYS:
+				return ((InternalEList<?>)getSurveys()).basicRemove(otherEnd, msgs);
 		}
 		return super.eInverseRemove(otherEnd, featureID, msgs);
 	}
@@ -724,6 +751,8 @@ public class StudyImpl extends NamedElementImpl implements Study {
 				return getStations();
 			case SpanfieldPackage.STUDY__LIMITS:
 				return getLimits();
+			case SpanfieldPackage.STUDY__SURVEYS:
+				return getSurveys();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -791,6 +820,10 @@ public class StudyImpl extends NamedElementImpl implements Study {
 				getLimits().clear();
 				getLimits().addAll((Collection<? extends FieldLimit>)newValue);
 				return;
+			case SpanfieldPackage.STUDY__SURVEYS:
+				getSurveys().clear();
+				getSurveys().addAll((Collection<? extends Survey>)newValue);
+				return;
 		}
 		super.eSet(featureID, newValue);
 	}
@@ -851,6 +884,9 @@ public class StudyImpl extends NamedElementImpl implements Study {
 			case SpanfieldPackage.STUDY__LIMITS:
 				getLimits().clear();
 				return;
+			case SpanfieldPackage.STUDY__SURVEYS:
+				getSurveys().clear();
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -895,6 +931,8 @@ public class StudyImpl extends NamedElementImpl implements Study {
 				return stations != null && !stations.isEmpty();
 			case SpanfieldPackage.STUDY__LIMITS:
 				return limits != null && !limits.isEmpty();
+			case SpanfieldPackage.STUDY__SURVEYS:
+				return surveys != null && !surveys.isEmpty();
 		}
 		return super.eIsSet(featureID);
 	}

@@ -205,6 +205,14 @@ public class SpanfieldAdapterFactory extends AdapterFactoryImpl {
 				return createFieldLimitAdapter();
 			}
 			@Override
+			public Adapter caseSurvey(Survey object) {
+				return createSurveyAdapter();
+			}
+			@Override
+			public Adapter caseSurveyReading(SurveyReading object) {
+				return createSurveyReadingAdapter();
+			}
+			@Override
 			public Adapter defaultCase(EObject object) {
 				return createEObjectAdapter();
 			}
@@ -697,6 +705,34 @@ public class SpanfieldAdapterFactory extends AdapterFactoryImpl {
 	 * @generated
 	 */
 	public Adapter createFieldLimitAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link spanfield.model.Survey <em>Survey</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see spanfield.model.Survey
+	 * @generated
+	 */
+	public Adapter createSurveyAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link spanfield.model.SurveyReading <em>Survey Reading</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see spanfield.model.SurveyReading
+	 * @generated
+	 */
+	public Adapter createSurveyReadingAdapter() {
 		return null;
 	}
 

@@ -292,6 +292,19 @@ public class SpanfieldSwitch<T> extends Switch<T> {
 				if (result == null) result = defaultCase(theEObject);
 				return result;
 			}
+			case SpanfieldPackage.SURVEY: {
+				Survey survey = (Survey)theEObject;
+				T result = caseSurvey(survey);
+				if (result == null) result = caseNamedElement(survey);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case SpanfieldPackage.SURVEY_READING: {
+				SurveyReading surveyReading = (SurveyReading)theEObject;
+				T result = caseSurveyReading(surveyReading);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
 			default: return defaultCase(theEObject);
 		}
 	}
@@ -803,6 +816,36 @@ public class SpanfieldSwitch<T> extends Switch<T> {
 	 * @generated
 	 */
 	public T caseFieldLimit(FieldLimit object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Survey</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Survey</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseSurvey(Survey object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Survey Reading</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Survey Reading</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseSurveyReading(SurveyReading object) {
 		return null;
 	}
 

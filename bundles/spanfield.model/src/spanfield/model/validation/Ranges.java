@@ -34,15 +34,18 @@ public final class Ranges {
     static {
         // longest corridor that a flat model and a straight continuation make sense for
         both(1e5, "m", P.getEdgePoint_StationMetres(), P.getElevationPoint_StationMetres(), P.getAlignmentBend_StationMetres(),
-            P.getStructure_StationMetres(), P.getProfileStation_StationMetres());
+            P.getStructure_StationMetres(), P.getProfileStation_StationMetres(), P.getSurveyReading_StationMetres());
         both(1e4, "m", P.getEdgePoint_LeftOffsetMetres(), P.getEdgePoint_RightOffsetMetres(), P.getGroundPoint_OffsetMetres(),
-            P.getStructure_OffsetMetres(), P.getProfileStation_FromOffsetMetres(), P.getProfileStation_ToOffsetMetres());
+            P.getStructure_OffsetMetres(), P.getProfileStation_FromOffsetMetres(), P.getProfileStation_ToOffsetMetres(), P.getSurveyReading_OffsetMetres());
         // from the Dead Sea to above any line on Earth
         closed(-500, 9000, "m", P.getElevationPoint_ElevationMetres(), P.getStructure_BaseElevationMetres());
         both(3000, "m", P.getGroundPoint_ElevationMetres());
         closed(0, 1e3, "Hz", P.getStudy_FrequencyHertz());
         closed(1e-2, 1e6, "ohm m", P.getStudy_EarthResistivityOhmMetres());
-        closed(0, 100, "m", P.getStudy_ReferenceHeightMetres());
+        closed(0, 100, "m", P.getStudy_ReferenceHeightMetres(), P.getSurveyReading_HeightMetres());
+        closed(0, 1, "", P.getSurvey_RelativeUncertainty());
+        // more than at the surface of any conductor
+        closed(0, 0.5, "T", P.getSurveyReading_ResultantTesla());
         closed(1e-12, 1e-2, "", P.getStudy_RelativeAccuracy());
         // 45 degrees of cross slope
         both(1, "", P.getCorridor_CrossSlope());

@@ -35,6 +35,7 @@ public final class ProfileCanvas extends Canvas {
     private Units units = Units.SI;
     private FieldMeasure measure = FieldMeasure.RESULTANT;
     private Predicate<String> shown = id -> true;
+    private List<Reading> readings = List.of();
     private boolean logarithmic;
     private boolean stale;
     private int cursor = -1;
@@ -78,6 +79,22 @@ public final class ProfileCanvas extends Canvas {
         measure = newMeasure;
         shown = cases;
         logarithmic = log;
+        redraw();
+    }
+
+    /**
+     * A measured value that lies over the curves.
+     *
+     * @param offsetMetres        offset in metres
+     * @param tesla               resultant in tesla RMS
+     * @param relativeUncertainty relative uncertainty of the reading
+     */
+    public record Reading(double offsetMetres, double tesla, double relativeUncertainty) {
+    }
+
+    /** Lays measured values over the curves; they are resultants, and are left out when the chart shows another measure. */
+    public void overlay(List<Reading> measured) {
+        readings = List.copyOf(measured);
         redraw();
     }
 
@@ -131,6 +148,9 @@ public final class ProfileCanvas extends Canvas {
             for (int i = 0; i < profile.size(); i++) {
                 greatest = Math.max(greatest, value(c, i));
             }
+        }
+        for (Reading reading : readings) {
+            greatest = Math.max(greatest, units.field().fromTesla(reading.tesla()) * (1 + reading.relativeUncertainty()));
         }
         across = new AxisScale(units.length().fromMetres(offsets[0]), units.length().fromMetres(offsets[offsets.length - 1]), plot.x,
             plot.x + plot.width, false);
@@ -216,10 +236,26 @@ public final class ProfileCanvas extends Canvas {
         gc.setLineWidth(1);
         gc.setLineStyle(SWT.LINE_SOLID);
         gc.setForeground(getForeground());
+        drawReadings(gc);
         if (cursor >= plot.x && cursor <= plot.x + plot.width) {
             gc.drawLine(cursor, plot.y, cursor, plot.y + plot.height);
         }
         gc.setClipping((Rectangle) null);
+    }
+
+    /** Measured values as crosses with bars of their uncertainty. */
+    private void drawReadings(GC gc) {
+        if (measure != FieldMeasure.RESULTANT) {
+            return;
+        }
+        for (Reading reading : readings) {
+            int x = across.toPixel(units.length().fromMetres(reading.offsetMetres()));
+            double value = units.field().fromTesla(reading.tesla());
+            int y = up.toPixel(value);
+            gc.drawLine(x - 4, y - 4, x + 4, y + 4);
+            gc.drawLine(x - 4, y + 4, x + 4, y - 4);
+            gc.drawLine(x, up.toPixel(value * (1 - reading.relativeUncertainty())), x, up.toPixel(value * (1 + reading.relativeUncertainty())));
+        }
     }
 
     private void style(GC gc, int number) {
@@ -234,7 +270,8 @@ public final class ProfileCanvas extends Canvas {
         double offset = reading ? units.length().toMetres(across.toValue(cursor)) : Double.NaN;
         gc.setForeground(getForeground());
         gc.drawText(reading ? "At " + Numbers.fixed(across.toValue(cursor), 1) + " " + units.length().code() + ":"
-            : "Move the pointer over the chart, or use the arrow keys, to read values.", plot.x, y - line - 2, true);
+            : readings.isEmpty() ? "Move the pointer over the chart, or use the arrow keys, to read values."
+            : "Crosses: " + readings.size() + " measured values with their uncertainty, not scaled to a load.", plot.x, y - line - 2, true);
         int number = 0;
         for (ProfileCase c : profile.cases()) {
             if (shown.test(c.loadCase().id())) {

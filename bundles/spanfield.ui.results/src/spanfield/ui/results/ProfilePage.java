@@ -9,6 +9,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import org.eclipse.emf.common.command.CompoundCommand;
+import org.eclipse.emf.edit.command.AddCommand;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.jface.layout.GridDataFactory;
 import org.eclipse.jface.layout.GridLayoutFactory;
@@ -30,12 +32,18 @@ import org.eclipse.swt.widgets.TableItem;
 import spanfield.model.FieldMeasure;
 import spanfield.model.LoadCase;
 import spanfield.model.ProfileStation;
+import spanfield.model.SpanfieldPackage;
+import spanfield.model.Survey;
+import spanfield.model.SurveyReading;
+import spanfield.model.io.StudyIds;
 import spanfield.report.FieldUnit;
 import spanfield.report.LengthUnit;
 import spanfield.report.ProfileReport;
 import spanfield.report.Units;
 import spanfield.report.plot.PlotOptions;
 import spanfield.report.plot.ProfilePlot;
+import spanfield.study.StudyInputException;
+import spanfield.study.SurveyCsv;
 import spanfield.study.result.LateralProfile;
 import spanfield.ui.common.DisplayUnits;
 import spanfield.ui.common.ProfileCanvas;
@@ -46,6 +54,8 @@ import spanfield.ui.common.StudyPage;
 public final class ProfilePage extends StudyPage {
 
     private static final int PICTURE_WIDTH = 1600;
+    /** Distance along the corridor up to which a reading counts as taken at a station. */
+    private static final double SAME_STATION_METRES = 1;
 
     private ProfileCanvas canvas;
     private Combo stations;
@@ -76,6 +86,7 @@ public final class ProfilePage extends StudyPage {
         logarithmic = new Button(bar, SWT.CHECK);
         logarithmic.setText("Logarithmic");
         logarithmic.addListener(SWT.Selection, event -> configure());
+        button(bar, "Import survey...", this::importSurvey);
         button(bar, "Export...", this::export);
         button(bar, "Copy", this::copy);
         canvas = new ProfileCanvas(page, false);
@@ -163,6 +174,7 @@ public final class ProfilePage extends StudyPage {
             }
         }
         canvas.configure(units(), measure(), chosen::contains, logarithmic.getSelection());
+        canvas.overlay(readings());
         computed(editor().computation().outcome());
     }
 
@@ -183,6 +195,48 @@ public final class ProfilePage extends StudyPage {
             return true;
         }
         return false;
+    }
+
+    /** Readings of all surveys that were taken at the station shown. */
+    private List<ProfileCanvas.Reading> readings() {
+        List<ProfileCanvas.Reading> readings = new ArrayList<>();
+        int index = stations.getSelectionIndex();
+        if (index >= 0 && index < document().study().getStations().size()) {
+            double station = document().study().getStations().get(index).getStationMetres();
+            for (Survey survey : document().study().getSurveys()) {
+                for (SurveyReading reading : survey.getReadings()) {
+                    if (Math.abs(reading.getStationMetres() - station) <= SAME_STATION_METRES) {
+                        readings.add(new ProfileCanvas.Reading(reading.getOffsetMetres(), reading.getResultantTesla(), survey.getRelativeUncertainty()));
+                    }
+                }
+            }
+        }
+        return readings;
+    }
+
+    private void importSurvey() {
+        FileDialog dialog = new FileDialog(canvas.getShell(), SWT.OPEN);
+        dialog.setText("Import survey");
+        dialog.setFilterExtensions(new String[] {"*.csv", "*"});
+        dialog.setFilterNames(new String[] {"Comma-separated values", "All files"});
+        String chosen = dialog.open();
+        if (chosen != null) {
+            importSurvey(Path.of(chosen));
+        }
+    }
+
+    /** Adds the readings of a file to the study, as one command; tells the user when the file is not a survey. */
+    public void importSurvey(Path file) {
+        try {
+            String name = file.getFileName().toString().replaceFirst("[.]csv$", "");
+            Survey survey = SurveyCsv.read(Files.readString(file), name);
+            StudyIds.assign(survey, document().study());
+            CompoundCommand command = new CompoundCommand("Import survey " + name);
+            command.append(AddCommand.create(document().domain(), document().study(), SpanfieldPackage.eINSTANCE.getStudy_Surveys(), survey));
+            document().execute(command);
+        } catch (IOException | StudyInputException failure) {
+            MessageDialog.openError(canvas.getShell(), "The survey was not imported", "'" + file + "': " + failure.getMessage());
+        }
     }
 
     private void export() {
