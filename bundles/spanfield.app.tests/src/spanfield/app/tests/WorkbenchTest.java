@@ -262,6 +262,23 @@ class WorkbenchTest {
     }
 
     @Test
+    void placedWires_appearAtThePointer() throws IOException {
+        StudyEditor editor = openExample("hillside");
+        SectionPage section = showPage(editor, SectionPage.class);
+        var line = editor.document().study().getLines().get(0);
+        Point peak = section.view().placeOf(line.getShieldWires().get(0));
+        int beside = section.view().pixels(20);
+        section.view().placeShieldWire(peak.x + beside, peak.y);
+        settle(editor);
+        assertEquals(2, line.getShieldWires().size());
+        pump(() -> section.view().placeOf(line.getShieldWires().get(1)) != null);
+        Point placed = section.view().placeOf(line.getShieldWires().get(1));
+        assertEquals(peak.x + beside, placed.x, section.view().pixels(1) + 2);
+        assertTrue(editor.computation().outcome().errors() == 0, editor.computation().outcome().findings().toString());
+        picture("SectionPage-palette");
+    }
+
+    @Test
     void brokenStudy_showsFindingsAndNoResults() throws IOException {
         StudyEditor editor = openExample("heathland");
         Phase phase = editor.document().study().getLines().get(0).getCircuits().get(0).getPhases().get(1);

@@ -13,6 +13,7 @@ import org.eclipse.emf.edit.command.SetCommand;
 import org.eclipse.emf.edit.domain.EditingDomain;
 import spanfield.model.Attachment;
 import spanfield.model.AttachmentRole;
+import spanfield.model.Bonding;
 import spanfield.model.Circuit;
 import spanfield.model.CircuitLoad;
 import spanfield.model.CurrentLoad;
@@ -44,28 +45,47 @@ final class CircuitEdits {
     private CircuitEdits() {
     }
 
-    /**
-     * Adds a three-phase circuit to a line: new attachments to the right of the outermost one, on every structure type of the line, and a
-     * current of zero in every load case.
-     */
-    static Command add(EditingDomain domain, Study study, Line line) {
-        CompoundCommand command = new CompoundCommand("Add circuit");
-        String stem = "circuit " + (line.getCircuits().size() + 1) + " phase ";
+    /** Where a new circuit goes by itself: to the right of the outermost attachment, as low as the lowest phase. Offset and wire height. */
+    static double[] besideTheOthers(Line line) {
+        double outermost = 0;
+        double lowest = LEAST_HEIGHT_METRES;
+        for (StructureType type : types(line)) {
+            outermost = Math.max(outermost, type.getAttachments().stream().mapToDouble(Attachment::getOffsetMetres).max().orElse(0));
+            lowest = Math.max(lowest, type.getAttachments().stream().filter(a -> a.getRole() == AttachmentRole.PHASE)
+                .mapToDouble(a -> a.getHeightMetres() - a.getInsulatorLengthMetres()).min().orElse(LEAST_HEIGHT_METRES));
+        }
+        return new double[] {outermost + CLEAR_METRES, lowest};
+    }
+
+    private static Set<StructureType> types(Line line) {
         Set<StructureType> types = new LinkedHashSet<>();
         line.getStructures().stream().map(Structure::getType).filter(java.util.Objects::nonNull).forEach(types::add);
-        for (StructureType type : types) {
-            double outermost = type.getAttachments().stream().mapToDouble(Attachment::getOffsetMetres).max().orElse(0);
-            double lowest = type.getAttachments().stream().filter(a -> a.getRole() == AttachmentRole.PHASE).mapToDouble(Attachment::getHeightMetres).min()
-                .orElse(LEAST_HEIGHT_METRES);
-            for (int i = 0; i < 3; i++) {
-                Attachment attachment = F.createAttachment();
-                attachment.setName(stem + (char) ('A' + i));
-                attachment.setOffsetMetres(outermost + CLEAR_METRES);
-                attachment.setHeightMetres(Math.max(LEAST_HEIGHT_METRES, lowest) + (2 - i) * SPACING_METRES);
-                attachment.setInsulatorLengthMetres(INSULATOR_METRES);
-                command.append(AddCommand.create(domain, type, P.getStructureType_Attachments(), attachment));
-            }
+        return types;
+    }
+
+    private static void addAttachment(EditingDomain domain, Line line, String name, AttachmentRole role, double offset, double wireHeight, double insulator,
+        CompoundCommand command) {
+        for (StructureType type : types(line)) {
+            Attachment attachment = F.createAttachment();
+            attachment.setName(name);
+            attachment.setRole(role);
+            attachment.setOffsetMetres(SectionMoves.round(offset, 0.1));
+            attachment.setHeightMetres(SectionMoves.round(Math.max(1, wireHeight) + insulator, 0.1));
+            attachment.setInsulatorLengthMetres(insulator);
+            command.append(AddCommand.create(domain, type, P.getStructureType_Attachments(), attachment));
         }
+    }
+
+    /**
+     * Adds a three-phase circuit to a line: new attachments on every structure type of the line, the phases one above the other, and a current
+     * of zero in every load case.
+     *
+     * @param offset     offset from the axis of the structures in metres
+     * @param wireHeight height of the lowest phase at the structures in metres
+     */
+    static Command add(EditingDomain domain, Study study, Line line, double offset, double wireHeight) {
+        CompoundCommand command = new CompoundCommand("Add circuit");
+        String stem = unused(line, "circuit ");
         Circuit circuit = F.createCircuit();
         circuit.setName("Circuit " + (line.getCircuits().size() + 1) + " of " + line.getName());
         if (!line.getCircuits().isEmpty()) {
@@ -75,10 +95,12 @@ final class CircuitEdits {
             circuit.setConductor(study.getConductors().get(0));
         }
         for (int i = 0; i < 3; i++) {
+            String label = String.valueOf((char) ('A' + i));
+            addAttachment(domain, line, stem + " phase " + label, AttachmentRole.PHASE, offset, wireHeight + (2 - i) * SPACING_METRES, INSULATOR_METRES, command);
             Phase phase = F.createPhase();
-            phase.setLabel(String.valueOf((char) ('A' + i)));
+            phase.setLabel(label);
             phase.setAngleDegrees(ANGLES[i]);
-            phase.setAttachment(stem + (char) ('A' + i));
+            phase.setAttachment(stem + " phase " + label);
             circuit.getPhases().add(phase);
         }
         StudyIds.assign(circuit, study);
@@ -89,6 +111,34 @@ final class CircuitEdits {
             command.append(AddCommand.create(domain, loadCase, P.getLoadCase_Loads(), load));
         }
         return command;
+    }
+
+    /** Adds a shield wire to a line; it is insulated when its conductor has no resistance, since a bonded one needs it. */
+    static Command addShield(EditingDomain domain, Study study, Line line, double offset, double wireHeight) {
+        CompoundCommand command = new CompoundCommand("Add shield wire");
+        String name = unused(line, "shield ");
+        addAttachment(domain, line, name, AttachmentRole.SHIELD, offset, wireHeight, 0, command);
+        ShieldWire wire = F.createShieldWire();
+        wire.setName("Shield wire " + (line.getShieldWires().size() + 1) + " of " + line.getName());
+        wire.setAttachment(name);
+        wire.setConductor(!line.getShieldWires().isEmpty() ? line.getShieldWires().get(0).getConductor()
+            : study.getConductors().isEmpty() ? null : study.getConductors().get(study.getConductors().size() - 1));
+        boolean bondable = wire.getConductor() != null && wire.getConductor().getLowResistanceOhmsPerMetre() != null
+            && study.getEarthResistivityOhmMetres() != null;
+        wire.setBonding(bondable ? Bonding.BONDED : Bonding.INSULATED);
+        StudyIds.assign(wire, study);
+        command.append(AddCommand.create(domain, line, P.getLine_ShieldWires(), wire));
+        return command;
+    }
+
+    /** A name that no attachment of the line begins with. */
+    private static String unused(Line line, String stem) {
+        for (int i = 1;; i++) {
+            String name = stem + i;
+            if (types(line).stream().flatMap(type -> type.getAttachments().stream()).noneMatch(a -> String.valueOf(a.getName()).startsWith(name))) {
+                return name;
+            }
+        }
     }
 
     /** Removes a circuit or shield wire together with its loads and its exceptions of stringing. */

@@ -26,6 +26,9 @@ interface SectionContext {
     /** Moves an item by pixels, as a command. */
     void move(SectionItem item, Point delta);
 
+    /** Places something new, as a command. */
+    void place(SectionPalette.Kind kind, Point place);
+
     /** Computes what a move would give, without changing the study. */
     void preview(SectionItem item, Point delta);
 

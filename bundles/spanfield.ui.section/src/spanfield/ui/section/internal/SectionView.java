@@ -14,7 +14,10 @@ import org.eclipse.gef.EditDomain;
 import org.eclipse.gef.EditPart;
 import org.eclipse.gef.EditPartFactory;
 import org.eclipse.gef.editparts.FreeformGraphicalRootEditPart;
+import org.eclipse.gef.ui.palette.PaletteViewer;
 import org.eclipse.gef.ui.parts.ScrollingGraphicalViewer;
+import org.eclipse.jface.layout.GridDataFactory;
+import org.eclipse.jface.layout.GridLayoutFactory;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.RGB;
@@ -27,6 +30,7 @@ import spanfield.model.Phase;
 import spanfield.model.ProfileStation;
 import spanfield.model.ShieldWire;
 import spanfield.model.StrungElement;
+import spanfield.model.Structure;
 import spanfield.model.Study;
 import spanfield.report.Numbers;
 import spanfield.report.Units;
@@ -43,6 +47,7 @@ public final class SectionView implements SectionContext {
     public static final String HINT = "Drag wires, structures and edges; arrow keys move what is chosen by 0.1 m. Properties takes exact values.";
 
     private static final double SNAP_METRES = 0.1;
+    private static final int PALETTE_WIDTH = 110;
     private static final double MARGIN_METRES = 8;
     private static final float[] HUES = {215, 25, 150, 290, 45, 185};
 
@@ -64,12 +69,20 @@ public final class SectionView implements SectionContext {
     public SectionView(Composite parent, StudyEditor editor, Consumer<String> reading) {
         this.editor = editor;
         this.reading = reading;
-        control = viewer.createControl(parent);
+        Composite both = new Composite(parent, SWT.NONE);
+        GridLayoutFactory.fillDefaults().numColumns(2).spacing(0, 0).applyTo(both);
+        PaletteViewer palette = new PaletteViewer();
+        Control tools = palette.createControl(both);
+        GridDataFactory.fillDefaults().hint(PALETTE_WIDTH, SWT.DEFAULT).grab(false, true).applyTo(tools);
+        control = viewer.createControl(both);
+        GridDataFactory.fillDefaults().grab(true, true).applyTo(control);
         control.setBackground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_BACKGROUND));
         control.setForeground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_FOREGROUND));
         EditDomain domain = new EditDomain();
         domain.setCommandStack(new EmfCommandStack(editor.document()));
         domain.addViewer(viewer);
+        domain.setPaletteViewer(palette);
+        domain.setPaletteRoot(SectionPalette.create());
         viewer.setRootEditPart(new FreeformGraphicalRootEditPart());
         viewer.setEditPartFactory(new Factory());
         viewer.setContents(this);
@@ -316,8 +329,8 @@ public final class SectionView implements SectionContext {
         return chosen != null && chosen.target() instanceof Phase phase ? (Circuit) phase.eContainer() : null;
     }
 
-    /** Adds a circuit to the line of the chosen item, or to the first line. */
-    public void addCircuit() {
+    /** The line of the chosen item, or the first line; null without lines. */
+    private Line line() {
         Study study = editor.document().study();
         SectionItem chosen = chosen();
         Line line = study.getLines().isEmpty() ? null : study.getLines().get(0);
@@ -328,9 +341,51 @@ public final class SectionView implements SectionContext {
         }
         if (line == null) {
             reading.accept("The study has no line yet: add one in the Outline, or begin a new study from a template.");
+        }
+        return line;
+    }
+
+    /** Adds a circuit beside the others of the line of the chosen item, or of the first line. */
+    public void addCircuit() {
+        Line line = line();
+        if (line != null) {
+            double[] place = CircuitEdits.besideTheOthers(line);
+            editor.document().execute(CircuitEdits.add(editor.document().domain(), editor.document().study(), line, place[0], place[1]));
+        }
+    }
+
+    @Override
+    public void place(SectionPalette.Kind kind, Point pixel) {
+        Line line = line();
+        if (line == null || station == null) {
             return;
         }
-        editor.document().execute(CircuitEdits.add(editor.document().domain(), study, line));
+        Study study = editor.document().study();
+        CorridorPlan plan = CorridorPlan.of(study.getCorridor());
+        double offset = scale.offset(pixel.x);
+        double height = scale.elevation(pixel.y) - plan.groundElevation(station.getStationMetres(), offset) + sagHere(line, plan);
+        double fromAxis = offset - nearest(line).getOffsetMetres();
+        editor.document().execute(kind == SectionPalette.Kind.CIRCUIT
+            ? CircuitEdits.add(editor.document().domain(), study, line, fromAxis, height)
+            : CircuitEdits.addShield(editor.document().domain(), study, line, fromAxis, height));
+    }
+
+    private Structure nearest(Line line) {
+        return line.getStructures().stream().min(java.util.Comparator.comparingDouble(
+            s -> Math.abs(s.getStationMetres() - station.getStationMetres()))).orElseThrow();
+    }
+
+    /** How much lower a wire of the line hangs here than at its structures, so that what is placed appears at the pointer. */
+    private double sagHere(Line line, CorridorPlan plan) {
+        for (SectionItem item : items) {
+            if (item.kind() == SectionItem.Kind.PHASE && item.target().eContainer().eContainer() == line) {
+                String name = ((Phase) item.target()).getAttachment();
+                double here = item.places().get(0)[1] - plan.groundElevation(station.getStationMetres(), item.places().get(0)[0]);
+                return nearest(line).getType().getAttachments().stream().filter(a -> name.equals(a.getName())).findFirst()
+                    .map(a -> a.getHeightMetres() - a.getInsulatorLengthMetres() - here).orElse(0.0);
+            }
+        }
+        return 0;
     }
 
     /** Removes the circuit of the chosen phase, or the chosen shield wire. */
@@ -360,6 +415,11 @@ public final class SectionView implements SectionContext {
     }
 
     // for tests
+
+    /** Places a shield wire at a pixel of the control, as the palette's tool does. */
+    public void placeShieldWire(int x, int y) {
+        place(SectionPalette.Kind.SHIELD_WIRE, inSheet(x, y));
+    }
 
     /** Place of a model object's item in the control, in pixels, or null when it is not shown. */
     public org.eclipse.swt.graphics.Point placeOf(EObject object) {
