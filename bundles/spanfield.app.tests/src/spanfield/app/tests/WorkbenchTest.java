@@ -111,6 +111,10 @@ class WorkbenchTest {
 
     private void picture(String name) throws IOException {
         Shell shell = window.getShell();
+        while (display.readAndDispatch()) {
+            // paint first
+        }
+        shell.update();
         Rectangle area = shell.getClientArea();
         Image image = new Image(display, area.width, area.height);
         GC gc = new GC(shell);
