@@ -2,6 +2,7 @@
 package spanfield.solver.field;
 
 import java.util.List;
+import org.apache.commons.math3.complex.Complex;
 import spanfield.solver.PhysicalConstants;
 import spanfield.solver.SolverInputException;
 import spanfield.solver.SolverInputException.Reason;
@@ -9,6 +10,8 @@ import spanfield.solver.earth.EarthReturn;
 import spanfield.solver.earth.HalfSpaceIntegral;
 import spanfield.solver.geometry.CatenarySpan;
 import spanfield.solver.geometry.Wire;
+import spanfield.solver.geometry.WireEnd;
+import spanfield.solver.geometry.WirePath;
 
 /** Earth terms of all wires at a block of points: complex images, and the difference of the exact half-space to the image. */
 final class EarthField {
@@ -26,6 +29,8 @@ final class EarthField {
     private final EarthReturn earth;
     private final ImageField[] images;
     private final double[][] planLines;
+    /** Along each mean line: where the wire starts and finishes, in metres from the line's point; infinite where it goes on. */
+    private final double[][] extents;
     private final double[] heights;
     private final double distance;
     private final double relative;
@@ -47,12 +52,44 @@ final class EarthField {
         }
         this.images = new ImageField[wires.size()];
         this.planLines = new double[wires.size()][];
+        this.extents = new double[wires.size()][];
         this.heights = new double[wires.size()];
         for (int w = 0; w < images.length; w++) {
             images[w] = new ImageField(wires.get(w), earth, lowestSum, relative);
             planLines[w] = wires.get(w).path().meanPlanLine();
+            extents[w] = extent(wires.get(w).path(), planLines[w]);
             heights[w] = wires.get(w).path().meanElevationMetres() - earth.planeElevationMetres();
         }
+    }
+
+    private static double[] extent(WirePath path, double[] line) {
+        return new double[] {path.start() == WireEnd.CONTINUES ? Double.NEGATIVE_INFINITY : along(line, path.first().x(), path.first().y()),
+            path.finish() == WireEnd.CONTINUES ? Double.POSITIVE_INFINITY : along(line, path.last().x(), path.last().y())};
+    }
+
+    /** Place of a point along a mean line, in metres from the line's point. */
+    private static double along(double[] line, double x, double y) {
+        return (x - line[0]) * line[2] + (y - line[1]) * line[3];
+    }
+
+    /**
+     * Share of an endless wire's earth correction that a wire with ends has: the share that the part between the ends has in the Biot-Savart
+     * field of the straight image, (sin t2 - sin t1)/2 seen from the point over the distance to the image. It is 1 for an endless wire, and
+     * the shares of wires that are joined end to end add up to 1.
+     */
+    private double share(int wire, double x, double y, double lateral, double heightSum) {
+        double[] extent = extents[wire];
+        if (Double.isInfinite(extent[0]) && Double.isInfinite(extent[1])) {
+            return 1;
+        }
+        Complex depth = earth.complexDepth().multiply(2);
+        double distance = Math.hypot(lateral, depth.add(heightSum).abs());
+        double t = along(planLines[wire], x, y);
+        return (sine(extent[1] - t, distance) - sine(extent[0] - t, distance)) / 2;
+    }
+
+    private static double sine(double along, double distance) {
+        return Double.isInfinite(along) ? Math.signum(along) : along / Math.hypot(along, distance);
     }
 
     private static double lowestWire(List<Wire> wires) {
@@ -156,12 +193,14 @@ final class EarthField {
     private void difference(int wire, double x, double y, double z, double[] scratch, double[] out) {
         double[] line = planLines[wire];
         double heightSum = Math.max(heights[wire] + z - earth.planeElevationMetres(), LEAST_HEIGHT_SUM);
-        halfSpace.difference(lateral(wire, x, y), heightSum, scratch);
-        out[0] = scratch[0] * line[3];
-        out[1] = scratch[1] * line[3];
-        out[2] = -scratch[0] * line[2];
-        out[3] = -scratch[1] * line[2];
-        out[4] = scratch[2];
-        out[5] = scratch[3];
+        double lateral = lateral(wire, x, y);
+        halfSpace.difference(lateral, heightSum, scratch);
+        double share = share(wire, x, y, lateral, heightSum);
+        out[0] = share * scratch[0] * line[3];
+        out[1] = share * scratch[1] * line[3];
+        out[2] = -share * scratch[0] * line[2];
+        out[3] = -share * scratch[1] * line[2];
+        out[4] = share * scratch[2];
+        out[5] = share * scratch[3];
     }
 }

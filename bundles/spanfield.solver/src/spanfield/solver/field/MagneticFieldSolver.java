@@ -21,7 +21,8 @@ import spanfield.solver.geometry.WireEnd;
  * <p>Composition of {@link EarthModel#EXACT_HALF_SPACE}: free space along the true path, plus the complex image of the true path, plus
  * [exact half-space less complex image] of the infinite straight wire at the wire's mean height and offset in its mean direction. For a
  * straight level wire that is the exact half-space field; for lines with turns the geometry stays in the image, and the bracket, which
- * is the error of the image, is taken in the mean direction.
+ * is the error of the image, is taken in the mean direction. A wire that ends has the share of the bracket that it has in the field of the
+ * endless image.
  *
  * <p>Accuracy is relative to the resultant of balanced circuits: the coefficient of a wire is computed more finely the farther away the
  * point is, since balanced currents cancel there. The bound that the result carries holds in any case. Without state; thread-safe.

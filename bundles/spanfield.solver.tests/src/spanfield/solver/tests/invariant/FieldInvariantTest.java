@@ -214,6 +214,27 @@ class FieldInvariantTest {
         }
     }
 
+    /** A wire cut in two that ends where the other begins is the same wire, under every earth model. */
+    @Test
+    void wiresJoinedEndToEnd_areOneWire() {
+        CatenarySpan first = CatenarySpan.ofConstant(new Position(4, -200, 20), new Position(4, 0, 20), 1200, 0);
+        CatenarySpan second = CatenarySpan.ofConstant(new Position(4, 0, 20), new Position(4, 250, 20), 1200, 0);
+        List<Wire> joined = List.of(new Wire("a", new WirePath(List.of(first), WireEnd.CONTINUES, WireEnd.ENDS), 0.01),
+            new Wire("b", new WirePath(List.of(second), WireEnd.ENDS, WireEnd.CONTINUES), 0.01));
+        Wire whole = new Wire("whole", new WirePath(List.of(first, second), WireEnd.CONTINUES, WireEnd.CONTINUES), 0.01);
+        ObservationPoints points = ObservationPoints.lateral(-300, 300, 61, 40, 1);
+        // the two halves have other mean heights than the whole, by a metre in some hundred of complex depth
+        final double meanHeights = 2e-5;
+        for (EarthReturn earth : List.of(EXACT, IMAGES, EarthReturn.none())) {
+            FieldPhasors two = Lines.field(joined, points, earth, new Complex[] {new Complex(100), new Complex(100)});
+            FieldPhasors one = Lines.field(List.of(whole), points, earth, new Complex[] {new Complex(100)});
+            for (int i = 0; i < points.size(); i++) {
+                assertEquals(one.resultantTesla(i), two.resultantTesla(i), meanHeights * one.resultantTesla(i));
+                assertEquals(one.modelErrorTesla(i), two.modelErrorTesla(i), 1e-3 * one.resultantTesla(i));
+            }
+        }
+    }
+
     /** Insulating earth adds nothing; perfectly conducting earth leaves no vertical field at its surface. */
     @Test
     void resistivityLimits_areMirrorAndNothing() {

@@ -126,7 +126,7 @@ class EvidenceTest {
         m.line().setFinishEnd(LineEnd.DEAD_END);
         Evidence e = Runs.table(m.study).evidence();
         assertTrue(e.notices().stream().anyMatch(n -> n.severity() == Notice.Severity.WARNING && n.text().contains("current path is open")));
-        assertTrue(says(e, "takes wires that end as endless ones"));
+        assertTrue(says(e, "has the share of the exact half-space correction"));
     }
 
     @Test
