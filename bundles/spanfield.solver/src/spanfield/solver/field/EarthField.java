@@ -105,10 +105,10 @@ final class EarthField {
     /**
      * Image field at the points of the block, [point][wire * 6 + value], in 1/m.
      *
-     * @param row   interpolation along the block, or null
      * @param error one element; receives the bound of the error of any wire's vector
      */
-    double[][] images(PointBlock block, RowInterpolation row, double[] error) {
+    double[][] images(PointBlock block, double[] error) {
+        RowInterpolation row = RowInterpolation.of(block, relative, Math.max(distance / RowInterpolation.halfLength(block), 1e-3));
         double quadrature = 0;
         for (ImageField image : images) {
             quadrature = Math.max(quadrature, image.error());
@@ -148,16 +148,13 @@ final class EarthField {
         double[] scratch = new double[4];
         if (row != null) {
             double gap = mirrorDistance(wire, row);
-            double bound = SINGULAR_PART * Math.pow(earth.complexDepth().abs(), -2) * (gap + row.halfLength()) * row.error(gap);
+            double singular = SINGULAR_PART * Math.pow(earth.complexDepth().abs(), -2) * (gap + row.halfLength());
+            // near the mirrored wire a row of its own, with as many nodes as the weak singularity asks for
+            RowInterpolation denser = gap > 0 && singular * row.error(gap) > wanted ? RowInterpolation.of(block, wanted / singular, gap / row.halfLength()) : null;
+            RowInterpolation chosen = denser == null ? row : denser;
+            double bound = singular * chosen.error(gap);
             if (bound <= wanted) {
-                double[][] values = new double[row.nodes.count][VALUES];
-                for (int k = 0; k < values.length; k++) {
-                    difference(wire, row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], scratch, values[k]);
-                }
-                for (int i = 0; i < block.count; i++) {
-                    java.util.Arrays.fill(out[i], 0);
-                    row.interpolate(values, i, out[i]);
-                }
+                interpolateDifferences(wire, block, chosen, scratch, out);
                 return bound;
             }
         }
@@ -165,6 +162,17 @@ final class EarthField {
             difference(wire, block.x[i], block.y[i], block.z[i], scratch, out[i]);
         }
         return 0;
+    }
+
+    private void interpolateDifferences(int wire, PointBlock block, RowInterpolation row, double[] scratch, double[][] out) {
+        double[][] values = new double[row.nodes.count][VALUES];
+        for (int k = 0; k < values.length; k++) {
+            difference(wire, row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], scratch, values[k]);
+        }
+        for (int i = 0; i < block.count; i++) {
+            java.util.Arrays.fill(out[i], 0);
+            row.interpolate(values, i, out[i]);
+        }
     }
 
     /** Least distance of a row's points to the mirrored mean line of a wire. */

@@ -36,7 +36,7 @@ public final class MagneticFieldSolver {
     private static final double SHARE_NEARBY = 0.3;
 
     /** Part of the asked accuracy that the images may use, relative to the image, which is far smaller than the field nearby. */
-    private static final double SHARE_OF_EARTH = 0.03;
+    private static final double SHARE_OF_EARTH = 0.3;
 
     /** Points from which the extent of the points is taken. */
     private static final int SAMPLES = 16;
@@ -116,9 +116,9 @@ public final class MagneticFieldSolver {
             relatives[w] = Math.max(FINEST, accuracy.relative() * SHARE_NEARBY * filaments[w].cancellation(block, CANCELLATION_LENGTH));
             finest = Math.min(finest, relatives[w]);
         }
-        RowInterpolation row = RowInterpolation.of(block, finest * 0.1);
+        RowInterpolation row = RowInterpolation.of(block, finest * 0.1, RowInterpolation.FAR);
         double[] imageError = {0};
-        double[][] images = earth == null ? null : earth.images(block, row, imageError);
+        double[][] images = earth == null ? null : earth.images(block, imageError);
         double[][] differences = new double[block.count][EarthField.VALUES];
         for (int w = 0; w < filaments.length; w++) {
             block.clearSums();

@@ -49,10 +49,11 @@ final class RowInterpolation {
     /**
      * The interpolation for a block, or null where the points are no straight row or too few.
      *
-     * @param relative wanted error of far sources relative to their size
+     * @param relative wanted error of the sources relative to their size
+     * @param distance least distance of the sources from the row, in half-lengths of the row
      */
-    static RowInterpolation of(PointBlock block, double relative) {
-        int n = 2 + (int) Math.ceil(Math.log(4 / relative) / Math.log(ellipse(SHORT_OF * FAR)));
+    static RowInterpolation of(PointBlock block, double relative, double distance) {
+        int n = 2 + (int) Math.ceil(Math.log(4 / (1 - SHORT_OF) / relative) / Math.log(ellipse(SHORT_OF * distance)));
         if (n > WORTHWHILE * block.count || n > PointBlock.CAPACITY) {
             return null;
         }
@@ -104,6 +105,12 @@ final class RowInterpolation {
         for (double[] row : cardinals) {
             row[point] /= sum;
         }
+    }
+
+    /** Half-length of a block in metres, from its first point to its last. */
+    static double halfLength(PointBlock block) {
+        int last = block.count - 1;
+        return Math.sqrt(square(block.x[last] - block.x[0], block.y[last] - block.y[0], block.z[last] - block.z[0])) / 2;
     }
 
     /** Half-length of the row in metres. */
