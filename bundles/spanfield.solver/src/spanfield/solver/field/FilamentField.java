@@ -246,7 +246,8 @@ final class FilamentField {
         double second = from + (to - from) * (along + NEAR_PANEL * distance / length);
         double margin = LEAST_SHARE * (to - from);
         boolean cutFirst = first > from + margin && first < to - margin;
-        boolean cutSecond = second > from + margin && second < to - margin;
+        // a point on the chord itself makes both cuts one
+        boolean cutSecond = second > from + margin && second < to - margin && !(cutFirst && second - first < margin);
         if (!cutFirst && !cutSecond) {
             double middle = (from + to) / 2;
             return panels(block, nodes, span, v, from, middle, tolerance) + panels(block, nodes, span, v, middle, to, tolerance);

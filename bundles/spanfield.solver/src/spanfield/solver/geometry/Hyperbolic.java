@@ -19,7 +19,7 @@ public final class Hyperbolic {
             return (e - 1 / e) / 2;
         }
         double q = u * u;
-        return u * (1 + q / 6 * (1 + q / 20 * (1 + q / 42 * (1 + q / 72 * (1 + q / 110 * (1 + q / 156))))));
+        return u * (1 + q * (1.0 / 6 + q * (1.0 / 120 + q * (1.0 / 5040 + q * (1.0 / 362880 + q * (1.0 / 39916800 + q * (1.0 / 6227020800L)))))));
     }
 
     /** cosh u - 1, without cancellation. */
@@ -29,6 +29,6 @@ public final class Hyperbolic {
             return (e + 1 / e) / 2 - 1;
         }
         double q = u * u;
-        return q / 2 * (1 + q / 12 * (1 + q / 30 * (1 + q / 56 * (1 + q / 90 * (1 + q / 132 * (1 + q / 182))))));
+        return q * (0.5 + q * (1.0 / 24 + q * (1.0 / 720 + q * (1.0 / 40320 + q * (1.0 / 3628800 + q * (1.0 / 479001600 + q * (1.0 / 87178291200L)))))));
     }
 }

@@ -99,7 +99,7 @@ class PublishedProfilesTest {
     }
 
     /**
-     * Check UKB-L2-U: UK network operators information site, 400 kV overhead lines, magnetic field (emfs.info, read in transcription): L2,
+     * Check UKB-L2-U: UK network operators information site, 400 kV overhead lines, magnetic field (emfs.info): L2,
      * phasing U, clearance 7.6 m, 2400 A.
      */
     @Test
