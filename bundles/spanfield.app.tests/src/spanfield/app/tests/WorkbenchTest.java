@@ -376,6 +376,19 @@ class WorkbenchTest {
     }
 
     @Test
+    void recoveredChanges_areSavedToTheFile() throws Exception {
+        StudyEditor editor = openExample("heathland");
+        Study unsaved = StudyFiles.copy(editor.document().study());
+        unsaved.setName("Changed before the crash");
+        editor.document().recover(unsaved);
+        assertTrue(editor.isDirty());
+        assertTrue(editor.document().hasFile());
+        editor.doSave(new org.eclipse.core.runtime.NullProgressMonitor());
+        assertFalse(editor.isDirty());
+        assertEquals("Changed before the crash", StudyFiles.load(editor.document().path()).getName());
+    }
+
+    @Test
     void sameFile_opensOnce() throws IOException {
         StudyEditor editor = openExample("heathland");
         Studies.open(window, editor.document().path());

@@ -34,6 +34,7 @@ public final class StudyDocument {
     private Study study;
     private Path path;
     private byte[] onDisk;
+    private boolean recovered;
 
     private StudyDocument(Study study, Path path, byte[] onDisk) {
         domain.getResourceSet().getResources().add(resource);
@@ -125,7 +126,7 @@ public final class StudyDocument {
 
     /** Whether there are changes that the file does not have. */
     public boolean dirty() {
-        return onDisk == null || commands.isSaveNeeded();
+        return onDisk == null || recovered || commands.isSaveNeeded();
     }
 
     /**
@@ -142,6 +143,7 @@ public final class StudyDocument {
         StudyFiles.save(study, target);
         path = target;
         onDisk = content(target);
+        recovered = false;
         commands.saveIsDone();
     }
 
@@ -165,15 +167,16 @@ public final class StudyDocument {
         Study fresh = StudyFiles.load(path);
         adopt(fresh);
         onDisk = content(path);
+        recovered = false;
         commands.flush();
         commands.saveIsDone();
     }
 
-    /** Replaces the content by that of a recovered study; the document is dirty afterwards. */
-    public void recover(Study recovered) {
-        adopt(recovered);
+    /** Replaces the content by unsaved changes of an earlier session; the document is dirty until it is saved to its file. */
+    public void recover(Study unsaved) {
+        adopt(unsaved);
+        recovered = true;
         commands.flush();
-        onDisk = null;
     }
 
     public void addListener(CommandStackListener listener) {
