@@ -117,7 +117,7 @@ final class FilamentField {
         }
         row.spread(block);
         // interpolation passes errors at the nodes on, magnified by its Lebesgue constant, about 3 for these numbers of nodes
-        return 3 * error + size;
+        return 3 * (error + rounding(nodes.nearest)) + size;
     }
 
     private void addTails(PointBlock block, boolean start, boolean finish) {
@@ -177,20 +177,37 @@ final class FilamentField {
         return Math.min(1, ratio * ratio);
     }
 
-    /** Greatest distance of a point of the block to the nearest chord, roughly: from the first point, plus the width of the block. */
+    /** Upper bound of the distance of any point of the block to the wire: that of the first point, and the width of the block. */
     double farthest(PointBlock block) {
-        return Math.max(chordDistance(block.x[0], block.y[0], block.z[0]) + width(block), wire.radiusMetres());
+        return Math.max(distanceAbove(block.x[0], block.y[0], block.z[0]) + width(block), wire.radiusMetres());
     }
 
-    /** Distance of a point to the nearest chord in metres. */
-    double chordDistance(double x, double y, double z) {
+    /**
+     * Upper bound of the distance of a point to the spans of the wire in metres, good to a few per cent for usual slopes: the distance to the
+     * wire where the foot of the point on the nearest chord is. The distance to the chord itself would not do: beside the chord of a
+     * sagged span it is far too small, and a tolerance taken from it far too wide.
+     */
+    double distanceAbove(double x, double y, double z) {
         double nearest = Double.POSITIVE_INFINITY;
+        int best = 0;
         for (int i = 0; i < vectors.length; i++) {
             SpanVectors v = vectors[i];
             double length = wire.path().spans().get(i).horizontalLengthMetres();
-            nearest = Math.min(nearest, segmentDistance(x, y, z, v.x0, v.y0, v.z0, v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz));
+            double distance = segmentDistance(x, y, z, v.x0, v.y0, v.z0, v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz);
+            if (distance < nearest) {
+                nearest = distance;
+                best = i;
+            }
         }
-        return nearest;
+        SpanVectors v = vectors[best];
+        CatenarySpan span = wire.path().spans().get(best);
+        double along = ((x - v.x0) * v.tx + (y - v.y0) * v.ty + (z - v.z0) * v.tz) / (v.tx * v.tx + v.ty * v.ty + v.tz * v.tz);
+        double s = Math.max(0, Math.min(span.horizontalLengthMetres(), along));
+        double depth = span.depthMetres(s);
+        double dx = x - v.x0 - s * v.tx - depth * v.ex;
+        double dy = y - v.y0 - s * v.ty - depth * v.ey;
+        double dz = z - v.z0 - s * v.tz - depth * v.ez;
+        return Math.sqrt(dx * dx + dy * dy + dz * dz);
     }
 
     static double width(PointBlock block) {

@@ -149,7 +149,7 @@ public final class MagneticFieldSolver {
         for (int i = 0; i < points.size(); i += step) {
             double nearest = Double.POSITIVE_INFINITY;
             for (FilamentField filament : filaments) {
-                nearest = Math.min(nearest, filament.chordDistance(points.x(i), points.y(i), points.z(i)));
+                nearest = Math.min(nearest, filament.distanceAbove(points.x(i), points.y(i), points.z(i)));
             }
             greatest = Math.max(greatest, nearest);
         }

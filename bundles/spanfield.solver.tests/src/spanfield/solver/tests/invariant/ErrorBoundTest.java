@@ -14,11 +14,13 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import spanfield.solver.Progress;
 import spanfield.solver.SolverInputException;
+import spanfield.solver.earth.EarthModel;
 import spanfield.solver.earth.EarthReturn;
 import spanfield.solver.field.Accuracy;
 import spanfield.solver.field.FieldPhasors;
 import spanfield.solver.field.MagneticFieldSolver;
 import spanfield.solver.field.ObservationPoints;
+import spanfield.solver.field.TransferCoefficients;
 import spanfield.solver.geometry.CatenarySpan;
 import spanfield.solver.geometry.Position;
 import spanfield.solver.geometry.Wire;
@@ -26,6 +28,7 @@ import spanfield.solver.geometry.WirePath;
 import spanfield.solver.tests.support.Lines;
 import spanfield.solver.tests.support.RandomLines;
 import spanfield.solver.tests.support.ReferenceField;
+import spanfield.solver.tests.support.ReferenceImage;
 
 /** The error bound that a result carries holds, and is not idle; points from 0.3 m off a conductor to 5 km away. */
 class ErrorBoundTest {
@@ -79,6 +82,53 @@ class ErrorBoundTest {
             sum += difference * difference;
         }
         return Math.sqrt(sum);
+    }
+
+    /**
+     * Points on the chord of a sagged span, between its attachments, where the distance to the chord is zero or below rounding: the panels'
+     * cuts coincide there.
+     */
+    @ParameterizedTest
+    @ValueSource(doubles = {0, 1e-17, 1e-12, 1e-6, -0.3})
+    void pointsOnTheChord_haveTrueFiniteBounds(double aside) {
+        Wire wire = sagged(0, 22);
+        for (double y : new double[] {-450, -140, -75, -3, 0, 40, 149, 300}) {
+            Position point = new Position(aside, y == -450 ? -449 : y, 22);
+            FieldPhasors field = Lines.field(List.of(wire), ObservationPoints.of(point), EarthReturn.none(), new Complex[] {Complex.ONE});
+            double error = distance(field, 0, ReferenceField.of(wire, point));
+            assertTrue(error <= field.numericalErrorTesla(0), point + ": error " + error + " T, bound " + field.numericalErrorTesla(0) + " T");
+            assertTrue(field.numericalErrorTesla(0) <= 1e-5 * field.resultantTesla(0), point + ": bound " + field.numericalErrorTesla(0) + " T");
+        }
+    }
+
+    /** Complex images of sagged, swung, steep and turning wires, tails included, against brute force in complex arithmetic. */
+    @ParameterizedTest
+    @ValueSource(doubles = {0.01, 1, 100, 1e4})
+    void images_errorStaysBelowBound(double resistivity) {
+        Random random = new Random(77);
+        for (int t = 0; t < 60; t++) {
+            Wire wire = RandomLines.wire(random, "wire " + t);
+            double plane = lowest(wire) - 6;
+            Position anchor = RandomLines.pointNear(random, wire);
+            Position point = new Position(anchor.x(), anchor.y(), plane + 1);
+            EarthReturn earth = new EarthReturn(EarthModel.COMPLEX_IMAGES, resistivity, 50, plane);
+            TransferCoefficients with = Lines.transfer(List.of(wire), ObservationPoints.of(point), earth);
+            double[] free = ReferenceField.of(wire, point);
+            Complex[] image = ReferenceImage.of(wire, point, earth);
+            double square = 0;
+            for (int c = 0; c < 3; c++) {
+                double difference = with.coefficient(0, c, 0).subtract(image[c]).subtract(free[c]).abs();
+                square += difference * difference;
+            }
+            // brute force itself: rounding of some hundred terms
+            double own = 1e-13 * (Math.abs(free[0]) + Math.abs(free[1]) + Math.abs(free[2]));
+            assertTrue(Math.sqrt(square) <= with.numericalError(0, 0) + own,
+                "wire " + t + ": error " + Math.sqrt(square) + ", bound " + with.numericalError(0, 0));
+        }
+    }
+
+    private static double lowest(Wire wire) {
+        return wire.path().spans().stream().mapToDouble(span -> span.lowestPoint().z()).min().orElseThrow();
     }
 
     /** A sagged three-phase line: the resultant keeps the asked accuracy although balanced phases cancel, out to 5 km. */
