@@ -164,7 +164,7 @@ final class FilamentField {
      * seen from the nearest point.
      */
     private double rounding(double nearest) {
-        double shift = 48 * Math.ulp(greatestCoordinate);
+        double shift = 64 * Math.ulp(greatestCoordinate);
         return 2 * shift / (nearest * nearest);
     }
 
