@@ -22,6 +22,9 @@ final class EarthField {
     /** Least height sum in metres at which the half-space integral is evaluated where the ground lies below the earth plane. */
     static final double LEAST_HEIGHT_SUM = 0.5;
 
+    /** Greatest number of points of a profile that is interpolated as a whole: its table of weights has that many columns. */
+    private static final int GREATEST_WHOLE_ROW = 5000;
+
     /** Factor of kappa^2 zeta in the singular part of the difference, tesla metre per ampere: mu0/(2 pi) times 2 for the logarithm. */
     private static final double SINGULAR_PART = PhysicalConstants.MU0 / Math.PI;
 
@@ -34,6 +37,8 @@ final class EarthField {
     private final double[] heights;
     private final double distance;
     private final double relative;
+    private final RowInterpolation whole;
+    private final double[][] wholeImages;
 
     EarthField(List<Wire> wires, ObservationPoints points, EarthReturn earth, double relative) {
         this.earth = earth;
@@ -60,6 +65,31 @@ final class EarthField {
             extents[w] = extent(wires.get(w).path(), planLines[w]);
             heights[w] = wires.get(w).path().meanElevationMetres() - earth.planeElevationMetres();
         }
+        this.whole = wholeRow(points);
+        this.wholeImages = whole == null ? null : imagesAtNodes(whole);
+    }
+
+    /** One row of nodes for all points, where they are a profile that is short beside the distance of the images; null otherwise. */
+    private RowInterpolation wholeRow(ObservationPoints points) {
+        if (points.size() <= PointBlock.CAPACITY || points.size() > GREATEST_WHOLE_ROW) {
+            return null;
+        }
+        PointBlock all = new PointBlock(points.size());
+        all.load(points, 0, points.size());
+        RowInterpolation row = imageRow(all);
+        return row == null || row.error(distance) > relative ? null : row;
+    }
+
+    private RowInterpolation imageRow(PointBlock block) {
+        return RowInterpolation.of(block, relative, Math.max(distance / RowInterpolation.halfLength(block), 1e-3));
+    }
+
+    private double[][] imagesAtNodes(RowInterpolation row) {
+        double[][] values = new double[row.nodes.count][images.length * VALUES];
+        for (int k = 0; k < values.length; k++) {
+            evaluate(row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], values[k]);
+        }
+        return values;
     }
 
     private static double[] extent(WirePath path, double[] line) {
@@ -108,18 +138,22 @@ final class EarthField {
      * @param error one element; receives the bound of the error of any wire's vector
      */
     double[][] images(PointBlock block, double[] error) {
-        RowInterpolation row = RowInterpolation.of(block, relative, Math.max(distance / RowInterpolation.halfLength(block), 1e-3));
         double quadrature = 0;
         for (ImageField image : images) {
             quadrature = Math.max(quadrature, image.error());
         }
         double[][] result = new double[block.count][images.length * VALUES];
+        if (whole != null) {
+            for (int i = 0; i < block.count; i++) {
+                whole.interpolate(wholeImages, block.first + i, result[i]);
+            }
+            error[0] = 3 * quadrature + whole.error(distance) * 2 / distance;
+            return result;
+        }
+        RowInterpolation row = imageRow(block);
         double interpolation = row == null ? Double.POSITIVE_INFINITY : row.error(distance);
         if (interpolation <= relative) {
-            double[][] values = new double[row.nodes.count][images.length * VALUES];
-            for (int k = 0; k < values.length; k++) {
-                evaluate(row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], values[k]);
-            }
+            double[][] values = imagesAtNodes(row);
             for (int i = 0; i < block.count; i++) {
                 row.interpolate(values, i, result[i]);
             }
@@ -135,33 +169,30 @@ final class EarthField {
 
     /**
      * Exact half-space less complex image of a wire's mean straight line at the points of the block, in tesla per ampere: Re and Im of X, Y, Z,
-     * [point][value].
+     * [value][point].
      *
      * <p>The difference has a weak singularity where point and mirrored wire meet, kappa^2 zeta ln zeta; the row is interpolated where that
      * part is resolved to the wanted accuracy, and evaluated at every point elsewhere.
      *
+     * @param rows   rows of nodes along the block
      * @param wanted accuracy in tesla per ampere
-     * @param out    [point][6], overwritten
+     * @param out    [6][at least the points of the block], overwritten
      * @return bound of the error of interpolation and of the half-space functions in tesla per ampere
      */
-    double differences(int wire, PointBlock block, RowInterpolation row, double wanted, double[][] out) {
+    double differences(int wire, PointBlock block, RowInterpolation.Choice rows, double wanted, double[][] out) {
         double[] scratch = new double[4];
-        if (row != null) {
-            double gap = mirrorDistance(wire, row);
-            double singular = SINGULAR_PART * Math.pow(earth.complexDepth().abs(), -2) * (gap + row.halfLength());
-            // near the mirrored wire a row of its own, with as many nodes as the weak singularity asks for
-            RowInterpolation denser = gap > 0 && singular * row.error(gap) > wanted ? RowInterpolation.of(block, wanted / singular, gap / row.halfLength()) : null;
-            RowInterpolation chosen = denser == null ? row : denser;
-            double bound = singular * chosen.error(gap);
-            if (bound <= wanted) {
-                interpolateDifferences(wire, block, chosen, scratch, out);
-                // errors at the nodes are passed on, magnified by the Lebesgue constant, about 3 for these numbers of nodes
-                return bound + 3 * functionError(gap);
-            }
+        double gap = mirrorDistance(wire, block);
+        double half = RowInterpolation.halfLength(block);
+        double singular = SINGULAR_PART * Math.pow(earth.complexDepth().abs(), -2) * (gap + half);
+        RowInterpolation row = gap > 0 ? rows.of(block, wanted / singular, gap / half) : null;
+        if (row != null && singular * row.error(gap) <= wanted) {
+            interpolateDifferences(wire, row, scratch, out);
+            // errors at the nodes are passed on, magnified by the Lebesgue constant, about 3 for these numbers of nodes
+            return singular * row.error(gap) + 3 * functionError(gap);
         }
         double nearest = Double.POSITIVE_INFINITY;
         for (int i = 0; i < block.count; i++) {
-            difference(wire, block.x[i], block.y[i], block.z[i], scratch, out[i]);
+            difference(wire, block.x[i], block.y[i], block.z[i], scratch, out, i);
             nearest = Math.min(nearest, Math.hypot(lateral(wire, block.x[i], block.y[i]), heightSum(wire, block.z[i])));
         }
         return functionError(nearest);
@@ -176,26 +207,25 @@ final class EarthField {
         return Math.max(heights[wire] + z - earth.planeElevationMetres(), LEAST_HEIGHT_SUM);
     }
 
-    private void interpolateDifferences(int wire, PointBlock block, RowInterpolation row, double[] scratch, double[][] out) {
-        double[][] values = new double[row.nodes.count][VALUES];
-        for (int k = 0; k < values.length; k++) {
-            difference(wire, row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], scratch, values[k]);
+    private void interpolateDifferences(int wire, RowInterpolation row, double[] scratch, double[][] out) {
+        double[][] values = new double[VALUES][row.nodes.count];
+        for (int k = 0; k < row.nodes.count; k++) {
+            difference(wire, row.nodes.x[k], row.nodes.y[k], row.nodes.z[k], scratch, values, k);
         }
-        for (int i = 0; i < block.count; i++) {
-            java.util.Arrays.fill(out[i], 0);
-            row.interpolate(values, i, out[i]);
+        for (int v = 0; v < VALUES; v++) {
+            java.util.Arrays.fill(out[v], 0);
+            row.spread(values[v], out[v]);
         }
     }
 
-    /** Least distance of a row's points to the mirrored mean line of a wire. */
-    private double mirrorDistance(int wire, RowInterpolation row) {
-        double least = Double.POSITIVE_INFINITY;
-        PointBlock n = row.nodes;
-        for (int k = 0; k < n.count; k++) {
-            double heightSum = heights[wire] + n.z[k] - earth.planeElevationMetres();
-            least = Math.min(least, heightSum < LEAST_HEIGHT_SUM ? 0 : Math.hypot(lateral(wire, n.x[k], n.y[k]), heightSum));
-        }
-        return least;
+    /** Lower bound of the distance of a block's points, a row, to the mirrored mean line of a wire; 0 where the height sum is not positive. */
+    private double mirrorDistance(int wire, PointBlock block) {
+        int last = block.count - 1;
+        double x0 = lateral(wire, block.x[0], block.y[0]);
+        double x1 = lateral(wire, block.x[last], block.y[last]);
+        double across = x0 * x1 <= 0 ? 0 : Math.min(Math.abs(x0), Math.abs(x1));
+        double up = heights[wire] - earth.planeElevationMetres() + Math.min(block.z[0], block.z[last]);
+        return up < LEAST_HEIGHT_SUM ? 0 : Math.hypot(across, up);
     }
 
     /** Offset of a point to the right of a wire's mean line: right = (dy, -dx) for the direction (dx, dy). */
@@ -210,17 +240,17 @@ final class EarthField {
         }
     }
 
-    private void difference(int wire, double x, double y, double z, double[] scratch, double[] out) {
+    private void difference(int wire, double x, double y, double z, double[] scratch, double[][] out, int at) {
         double[] line = planLines[wire];
         double heightSum = heightSum(wire, z);
         double lateral = lateral(wire, x, y);
         halfSpace.difference(lateral, heightSum, scratch);
         double share = share(wire, x, y, lateral, heightSum);
-        out[0] = share * scratch[0] * line[3];
-        out[1] = share * scratch[1] * line[3];
-        out[2] = -share * scratch[0] * line[2];
-        out[3] = -share * scratch[1] * line[2];
-        out[4] = share * scratch[2];
-        out[5] = share * scratch[3];
+        out[0][at] = share * scratch[0] * line[3];
+        out[1][at] = share * scratch[1] * line[3];
+        out[2][at] = -share * scratch[0] * line[2];
+        out[3][at] = -share * scratch[1] * line[2];
+        out[4][at] = share * scratch[2];
+        out[5][at] = share * scratch[3];
     }
 }

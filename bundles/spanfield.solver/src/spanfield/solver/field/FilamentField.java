@@ -1,6 +1,8 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.solver.field;
 
+import java.util.concurrent.atomic.AtomicReferenceArray;
+import java.util.stream.IntStream;
 import spanfield.solver.SolverInputException;
 import spanfield.solver.SolverInputException.Reason;
 import spanfield.solver.geometry.CatenarySpan;
@@ -48,12 +50,15 @@ final class FilamentField {
     private final Wire wire;
     private final SpanVectors[] vectors;
     private final double[] sags;
+    /** Nodes on whole spans, [span * (greatest rule + 1) + number of nodes]; never changed once set. */
+    private final AtomicReferenceArray<SourceNodes> wholeSpans;
     private final double scaleLength;
     private final double greatestCoordinate;
 
     FilamentField(Wire wire) {
         this.wire = wire;
-        this.vectors = wire.path().spans().stream().map(SpanVectors::new).toArray(SpanVectors[]::new);
+        this.vectors = IntStream.range(0, wire.path().spans().size()).mapToObj(i -> new SpanVectors(wire.path().spans().get(i), i)).toArray(SpanVectors[]::new);
+        this.wholeSpans = new AtomicReferenceArray<>(vectors.length * (GaussRules.GREATEST + 1));
         this.sags = wire.path().spans().stream().mapToDouble(CatenarySpan::greatestDepthMetres).toArray();
         this.greatestCoordinate = wire.path().spans().stream().flatMapToDouble(span -> java.util.stream.DoubleStream.of(
             span.start().x(), span.start().y(), span.start().z(), span.end().x(), span.end().y(), span.end().z())).map(Math::abs).max().orElse(0);
@@ -76,7 +81,7 @@ final class FilamentField {
         WirePath path = wire.path();
         boolean anyFar = false;
         for (int i = 0; i < vectors.length; i++) {
-            if (row != null && spanDistance(row, i) > RowInterpolation.FAR * row.halfLength()) {
+            if (row != null && row.reaches(spanDistance(block, i))) {
                 anyFar = true;
                 continue;
             }
@@ -85,8 +90,8 @@ final class FilamentField {
         }
         block.accumulate(nodes);
         error += rounding(nodes.nearest);
-        boolean startFar = row != null && tailDistance(row, path.first()) > RowInterpolation.FAR * row.halfLength();
-        boolean finishFar = row != null && tailDistance(row, path.last()) > RowInterpolation.FAR * row.halfLength();
+        boolean startFar = row != null && row.reaches(tailDistance(row, path.first()));
+        boolean finishFar = row != null && row.reaches(tailDistance(row, path.last()));
         addTails(block, !startFar, !finishFar);
         return anyFar || startFar || finishFar ? error + addFar(block, row, nodes, tolerance, startFar, finishFar) : error;
     }
@@ -99,8 +104,8 @@ final class FilamentField {
         double error = 0;
         double size = 0;
         for (int i = 0; i < vectors.length; i++) {
-            double distance = spanDistance(row, i);
-            if (distance > RowInterpolation.FAR * row.halfLength()) {
+            double distance = spanDistance(block, i);
+            if (row.reaches(distance)) {
                 CatenarySpan span = wire.path().spans().get(i);
                 double length = span.horizontalLengthMetres();
                 error += panels(far, nodes, span, vectors[i], 0, length, tolerance);
@@ -132,16 +137,24 @@ final class FilamentField {
         }
     }
 
-    /** Lower bound of the distance of a span to any point of a row. */
-    private double spanDistance(RowInterpolation row, int i) {
+    /** Lower bound of the distance of a span to any point of a row, whose first and last point are its ends. */
+    private double spanDistance(PointBlock row, int i) {
         SpanVectors v = vectors[i];
         CatenarySpan span = wire.path().spans().get(i);
         double length = span.horizontalLengthMetres();
-        PointBlock n = row.nodes;
-        int last = n.count - 1;
-        double chord = segmentDistance((n.x[0] + n.x[last]) / 2, (n.y[0] + n.y[last]) / 2, (n.z[0] + n.z[last]) / 2, v.x0, v.y0, v.z0,
-            v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz);
-        return chord - sags[i] - row.halfLength();
+        int last = row.count - 1;
+        double chord = segmentDistance((row.x[0] + row.x[last]) / 2, (row.y[0] + row.y[last]) / 2, (row.z[0] + row.z[last]) / 2,
+            v.x0, v.y0, v.z0, v.x0 + length * v.tx, v.y0 + length * v.ty, v.z0 + length * v.tz);
+        return chord - sags[i] - RowInterpolation.halfLength(row);
+    }
+
+    /** Lower bound of the distance of the wire's spans to any point of a row; not positive where the row may come near. */
+    double distanceBelow(PointBlock row) {
+        double least = Double.POSITIVE_INFINITY;
+        for (int i = 0; i < vectors.length; i++) {
+            least = Math.min(least, spanDistance(row, i));
+        }
+        return least;
     }
 
     /** Lower bound of the distance of the tail from an attachment to any point of a row; also of the attachment itself. */
@@ -249,7 +262,11 @@ final class FilamentField {
             int n = nodesNeeded(allowed, rho, rate);
             if (n <= GaussRules.GREATEST) {
                 refuseInside(block, ax, ay, az, bx, by, bz, length * Math.sqrt((e - 1) * (e + 1)));
-                nodes.add(span, v, from, to, n);
+                if (to - from == span.horizontalLengthMetres()) {
+                    nodes.addAll(wholeSpan(span, v, n));
+                } else {
+                    nodes.add(span, v, from, to, n);
+                }
                 nodes.nearest = Math.min(nodes.nearest, length / 2 * Math.sqrt((e - 1) * (e + 1)));
                 return scale * Math.exp(logError(n, rho, rate));
             }
@@ -282,10 +299,23 @@ final class FilamentField {
         return error + panels(block, nodes, span, v, begin, to, tolerance);
     }
 
+    /** Nodes of the rule with n nodes on a whole span, computed once. Threads that come at the same time compute the same. */
+    private SourceNodes wholeSpan(CatenarySpan span, SpanVectors v, int n) {
+        int place = v.index * (GaussRules.GREATEST + 1) + n;
+        SourceNodes nodes = wholeSpans.get(place);
+        if (nodes == null) {
+            nodes = new SourceNodes();
+            nodes.add(span, v, 0, span.horizontalLengthMetres(), n);
+            wholeSpans.set(place, nodes);
+        }
+        return nodes;
+    }
+
     /** Least number of nodes whose error form stays below exp(allowed), or one more than the greatest rule has. */
     static int nodesNeeded(double allowed, double rho, double rate) {
-        int n = Math.max(GaussRules.LEAST, (int) Math.ceil(-allowed / (2 * Math.log(rho))));
-        while (n <= GaussRules.GREATEST && logError(n, rho, rate) > allowed) {
+        double logRho = Math.log(rho);
+        int n = Math.max(GaussRules.LEAST, (int) Math.ceil(-allowed / (2 * logRho)));
+        while (n <= GaussRules.GREATEST && logError(n, rho, logRho, rate) > allowed) {
             n++;
         }
         return Math.min(n, GaussRules.GREATEST + 1);
@@ -293,7 +323,14 @@ final class FilamentField {
 
     /** Logarithm of the least of exp(rate (r + 1/r) / 2) r^(-2n) over the ellipses r up to rho. */
     static double logError(int n, double rho, double rate) {
-        double r = Math.min(rho, 4 * n / rate);
+        return logError(n, rho, Math.log(rho), rate);
+    }
+
+    private static double logError(int n, double rho, double logRho, double rate) {
+        if (rho * rate <= 4 * n) {
+            return rate * (rho + 1 / rho) / 2 - 2 * n * logRho;
+        }
+        double r = 4 * n / rate;
         return rate * (r + 1 / r) / 2 - 2 * n * Math.log(r);
     }
 

@@ -46,7 +46,7 @@ final class ImageField {
 
     /** Equal parts of a span, each with the rule it needs: the nearest singularity is at least {@code distance} off the real axis. */
     private double addSpan(CatenarySpan span, double distance, double relative) {
-        SpanVectors v = new SpanVectors(span);
+        SpanVectors v = new SpanVectors(span, 0);
         double length = span.horizontalLengthMetres();
         for (int parts = 1;; parts++) {
             double half = length / parts / 2;

@@ -119,22 +119,27 @@ public final class MagneticFieldSolver {
             relatives[w] = Math.max(FINEST, accuracy.relative() * SHARE_NEARBY * filaments[w].cancellation(block, CANCELLATION_LENGTH));
             finest = Math.min(finest, relatives[w]);
         }
-        RowInterpolation row = RowInterpolation.of(block, finest * 0.1, RowInterpolation.FAR);
+        double[] distances = new double[filaments.length];
+        for (int w = 0; w < filaments.length; w++) {
+            distances[w] = filaments[w].distanceBelow(block);
+        }
+        RowInterpolation row = RowInterpolation.reaching(block, finest * 0.1, distances);
+        RowInterpolation.Choice rows = new RowInterpolation.Choice();
         double[] imageError = {0};
         double[][] images = earth == null ? null : earth.images(block, imageError);
-        double[][] differences = new double[block.count][EarthField.VALUES];
+        double[][] differences = new double[EarthField.VALUES][block.count];
         for (int w = 0; w < filaments.length; w++) {
             block.clearSums();
             double error = SCALE * (SAFETY * filaments[w].addTo(block, row, nodes, relatives[w]) + imageError[0]);
             if (earth != null) {
-                error += earth.differences(w, block, row, SCALE * relatives[w] / filaments[w].farthest(block), differences);
+                error += earth.differences(w, block, rows, SCALE * relatives[w] / filaments[w].farthest(block), differences);
+                result.setDifferences(w, block.first, differences);
             }
             for (int i = 0; i < block.count; i++) {
                 int point = block.first + i;
                 result.set(w, point, SCALE * block.sumX[i], SCALE * block.sumY[i], SCALE * block.sumZ[i], error);
                 if (earth != null) {
                     result.addImage(w, point, SCALE, images[i], w * EarthField.VALUES);
-                    result.setDifference(w, point, differences[i]);
                 }
             }
         }

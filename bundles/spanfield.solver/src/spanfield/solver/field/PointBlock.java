@@ -12,16 +12,36 @@ final class PointBlock {
     /** Points in a block: long enough for vector loops, short enough to stay in the first-level cache and near each other. */
     static final int CAPACITY = 64;
 
-    final double[] x = new double[CAPACITY];
-    final double[] y = new double[CAPACITY];
-    final double[] z = new double[CAPACITY];
-    final double[] sumX = new double[CAPACITY];
-    final double[] sumY = new double[CAPACITY];
-    final double[] sumZ = new double[CAPACITY];
+    final double[] x;
+    final double[] y;
+    final double[] z;
+    final double[] sumX;
+    final double[] sumY;
+    final double[] sumZ;
+    private final double[] cubeA;
+    private final double[] cubeB;
+    private final double[] inverse;
     /** Scratch of the panel test: sum of the distances to both ends of a panel, [point]. */
-    final double[] reach = new double[CAPACITY];
+    final double[] reach;
     int first;
     int count;
+
+    PointBlock() {
+        this(CAPACITY);
+    }
+
+    PointBlock(int capacity) {
+        x = new double[capacity];
+        y = new double[capacity];
+        z = new double[capacity];
+        sumX = new double[capacity];
+        sumY = new double[capacity];
+        sumZ = new double[capacity];
+        reach = new double[capacity];
+        cubeA = new double[capacity];
+        cubeB = new double[capacity];
+        inverse = new double[capacity];
+    }
 
     void load(ObservationPoints points, int from, int to) {
         first = from;
@@ -35,56 +55,64 @@ final class PointBlock {
         java.util.Arrays.fill(sumZ, 0, count, 0);
     }
 
-    /** Adds dl x R / |R|^3 of every node at every point, R from node to point. Two nodes a pass save loads and stores of the sums. */
-    void accumulate(SourceNodes nodes) {
-        int i = 0;
-        for (; i + 1 < nodes.count; i += 2) {
-            accumulatePair(nodes, i, i + 1);
+    /**
+     * Adds dl x R / |R|^3 of every node at every point, R from node to point.
+     *
+     * <p>Two nodes a pass, in loops that each write one array: the compiler cannot know that the sums are different arrays, and leaves a loop
+     * that writes several of them without vector instructions. The cubes of both distances share one division, the slowest operation here:
+     * 1/a = b/(a b).
+     */
+    void accumulate(SourceNodes s) {
+        int k = 0;
+        for (; k + 1 < s.count; k += 2) {
+            int l = k + 1;
+            cubes(x, y, z, cubeA, count, s.x[k], s.y[k], s.z[k]);
+            cubes(x, y, z, cubeB, count, s.x[l], s.y[l], s.z[l]);
+            inverses(cubeA, cubeB, inverse, count);
+            addPair(y, z, cubeA, cubeB, inverse, sumX, count, s.y[k], s.z[k], s.dy[k], s.dz[k], s.y[l], s.z[l], s.dy[l], s.dz[l]);
+            addPair(z, x, cubeA, cubeB, inverse, sumY, count, s.z[k], s.x[k], s.dz[k], s.dx[k], s.z[l], s.x[l], s.dz[l], s.dx[l]);
+            addPair(x, y, cubeA, cubeB, inverse, sumZ, count, s.x[k], s.y[k], s.dx[k], s.dy[k], s.x[l], s.y[l], s.dx[l], s.dy[l]);
         }
-        if (i < nodes.count) {
-            accumulateOne(nodes, i);
+        if (k < s.count) {
+            addOne(s, k);
         }
     }
 
-    private void accumulateOne(SourceNodes s, int k) {
-        accumulate1(x, y, z, sumX, sumY, sumZ, count, s.x[k], s.y[k], s.z[k], s.dx[k], s.dy[k], s.dz[k]);
-    }
-
-    private void accumulatePair(SourceNodes s, int k, int l) {
-        accumulate2(x, y, z, sumX, sumY, sumZ, count, s.x[k], s.y[k], s.z[k], s.dx[k], s.dy[k], s.dz[k],
-            s.x[l], s.y[l], s.z[l], s.dx[l], s.dy[l], s.dz[l]);
-    }
-
-    private static void accumulate1(double[] x, double[] y, double[] z, double[] sumX, double[] sumY, double[] sumZ, int count,
-        double nx, double ny, double nz, double dx, double dy, double dz) {
+    /** |R|^3 from a node to every point. */
+    private static void cubes(double[] x, double[] y, double[] z, double[] cube, int count, double nx, double ny, double nz) {
         for (int i = 0; i < count; i++) {
             double rx = x[i] - nx;
             double ry = y[i] - ny;
             double rz = z[i] - nz;
             double square = rx * rx + ry * ry + rz * rz;
-            double f = 1 / (square * Math.sqrt(square));
-            sumX[i] += (dy * rz - dz * ry) * f;
-            sumY[i] += (dz * rx - dx * rz) * f;
-            sumZ[i] += (dx * ry - dy * rx) * f;
+            cube[i] = square * Math.sqrt(square);
         }
     }
 
-    private static void accumulate2(double[] x, double[] y, double[] z, double[] sumX, double[] sumY, double[] sumZ, int count,
-        double nx, double ny, double nz, double dx, double dy, double dz, double mx, double my, double mz, double ex, double ey, double ez) {
+    private static void inverses(double[] a, double[] b, double[] inverse, int count) {
         for (int i = 0; i < count; i++) {
-            double rx = x[i] - nx;
-            double ry = y[i] - ny;
-            double rz = z[i] - nz;
-            double qx = x[i] - mx;
-            double qy = y[i] - my;
-            double qz = z[i] - mz;
+            inverse[i] = 1 / (a[i] * b[i]);
+        }
+    }
+
+    /** One component of the cross products of nodes a and b: (du rv - dv ru) / |R|^3, where u and v follow the component cyclically. */
+    private static void addPair(double[] u, double[] v, double[] cubeA, double[] cubeB, double[] inverse, double[] sum, int count,
+        double au, double av, double adu, double adv, double bu, double bv, double bdu, double bdv) {
+        for (int i = 0; i < count; i++) {
+            sum[i] += inverse[i] * ((adu * (v[i] - av) - adv * (u[i] - au)) * cubeB[i] + (bdu * (v[i] - bv) - bdv * (u[i] - bu)) * cubeA[i]);
+        }
+    }
+
+    private void addOne(SourceNodes s, int k) {
+        for (int i = 0; i < count; i++) {
+            double rx = x[i] - s.x[k];
+            double ry = y[i] - s.y[k];
+            double rz = z[i] - s.z[k];
             double square = rx * rx + ry * ry + rz * rz;
-            double other = qx * qx + qy * qy + qz * qz;
             double f = 1 / (square * Math.sqrt(square));
-            double g = 1 / (other * Math.sqrt(other));
-            sumX[i] += (dy * rz - dz * ry) * f + (ey * qz - ez * qy) * g;
-            sumY[i] += (dz * rx - dx * rz) * f + (ez * qx - ex * qz) * g;
-            sumZ[i] += (dx * ry - dy * rx) * f + (ex * qy - ey * qx) * g;
+            sumX[i] += (s.dy[k] * rz - s.dz[k] * ry) * f;
+            sumY[i] += (s.dz[k] * rx - s.dx[k] * rz) * f;
+            sumZ[i] += (s.dx[k] * ry - s.dy[k] * rx) * f;
         }
     }
 

@@ -1,6 +1,8 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.solver.field;
 
+import java.util.Arrays;
+
 /**
  * Interpolation of functions that are smooth over a row of points on Chebyshev nodes along the row, in barycentric form (Berrut and
  * Trefethen, SIAM Review 46, 2004). Sources that are far away in units of the row's length are evaluated at the nodes only. With n nodes
@@ -8,7 +10,7 @@ package spanfield.solver.field;
  */
 final class RowInterpolation {
 
-    /** Sources farther away than this many half-lengths of the row are interpolated. */
+    /** Sources farther away than this many half-lengths of the row are interpolated in any case. */
     static final double FAR = 6;
 
     /** Part of the way to the singularity at which the growth of a function is taken. */
@@ -24,9 +26,11 @@ final class RowInterpolation {
     final PointBlock nodes = new PointBlock();
     private final double[][] cardinals;
     private final double half;
+    private final double reach;
 
-    private RowInterpolation(PointBlock block, int n, double half) {
+    private RowInterpolation(PointBlock block, int n, double half, double reach) {
         this.half = half;
+        this.reach = reach;
         int last = block.count - 1;
         double[] position = new double[n];
         double[] weight = new double[n];
@@ -41,9 +45,11 @@ final class RowInterpolation {
         }
         nodes.count = n;
         cardinals = new double[n][block.count];
-        for (int i = 0; i < block.count; i++) {
-            fillCardinals(i, parameter(block, i), position, weight);
+        double[] t = new double[block.count];
+        for (int i = 0; i < t.length; i++) {
+            t[i] = parameter(block, i);
         }
+        fillCardinals(t, position, weight);
     }
 
     /**
@@ -53,8 +59,12 @@ final class RowInterpolation {
      * @param distance least distance of the sources from the row, in half-lengths of the row
      */
     static RowInterpolation of(PointBlock block, double relative, double distance) {
-        int n = 2 + (int) Math.ceil(Math.log(4 / (1 - SHORT_OF) / relative) / Math.log(ellipse(SHORT_OF * distance)));
-        if (n > WORTHWHILE * block.count || n > PointBlock.CAPACITY) {
+        int n = nodesNeeded(relative, distance);
+        return n > WORTHWHILE * block.count ? null : ofNodes(block, n, distance);
+    }
+
+    private static RowInterpolation ofNodes(PointBlock block, int n, double distance) {
+        if (n > PointBlock.CAPACITY) {
             return null;
         }
         int last = block.count - 1;
@@ -71,7 +81,58 @@ final class RowInterpolation {
                 return null;
             }
         }
-        return new RowInterpolation(block, n, length / 2);
+        return new RowInterpolation(block, n, length / 2, distance * length / 2);
+    }
+
+    /** Rows for one block by their number of nodes, in steps of {@value #STEP}, so that sources share them. A worker's scratch. */
+    static final class Choice {
+
+        private static final int STEP = 3;
+
+        private final RowInterpolation[] rows = new RowInterpolation[PointBlock.CAPACITY / STEP + 1];
+        private boolean none;
+
+        /** As {@link RowInterpolation#of}, with at least the nodes needed. Always for the same block. */
+        RowInterpolation of(PointBlock block, double relative, double distance) {
+            int n = nodesNeeded(relative, distance);
+            int place = (n + STEP - 1) / STEP;
+            if (none || place * STEP > WORTHWHILE * block.count) {
+                return null;
+            }
+            if (rows[place] == null) {
+                rows[place] = ofNodes(block, place * STEP, distance);
+                none = rows[place] == null;
+            }
+            return rows[place];
+        }
+    }
+
+    private static int nodesNeeded(double relative, double distance) {
+        double n = 2 + Math.ceil(Math.log(4 / (1 - SHORT_OF) / relative) / Math.log(ellipse(SHORT_OF * distance)));
+        return (int) Math.max(2, Math.min(n, 1e6));
+    }
+
+    /**
+     * The interpolation for a block that reaches as many of some sources as it can: those of which the distances are given, and everything
+     * beyond {@value #FAR} half-lengths. Null where the points are no straight row or too few.
+     *
+     * @param distances least distance of each source in metres, any sign
+     */
+    static RowInterpolation reaching(PointBlock block, double relative, double[] distances) {
+        double half = halfLength(block);
+        double least = FAR;
+        for (double distance : distances) {
+            double y = distance / half;
+            if (y > 0 && y < least && nodesNeeded(relative, y) <= WORTHWHILE * block.count) {
+                least = y;
+            }
+        }
+        return of(block, relative, least);
+    }
+
+    /** Whether sources at a distance in metres from every point are interpolated to the wanted error. */
+    boolean reaches(double distance) {
+        return distance >= reach;
     }
 
     private static double square(double x, double y, double z) {
@@ -88,22 +149,31 @@ final class RowInterpolation {
         return 2 * along / square(dx, dy, dz) - 1;
     }
 
-    private void fillCardinals(int point, double t, double[] position, double[] weight) {
-        double sum = 0;
+    /** Cardinal functions in barycentric form, by loops over the points. */
+    private void fillCardinals(double[] t, double[] position, double[] weight) {
+        double[] sum = new double[t.length];
         for (int k = 0; k < position.length; k++) {
-            double difference = t - position[k];
-            if (difference == 0) {
-                for (double[] row : cardinals) {
-                    row[point] = 0;
-                }
-                cardinals[k][point] = 1;
-                return;
+            double[] row = cardinals[k];
+            double p = position[k];
+            double w = weight[k];
+            for (int i = 0; i < t.length; i++) {
+                row[i] = w / (t[i] - p);
             }
-            cardinals[k][point] = weight[k] / difference;
-            sum += cardinals[k][point];
+            for (int i = 0; i < t.length; i++) {
+                sum[i] += row[i];
+            }
         }
         for (double[] row : cardinals) {
-            row[point] /= sum;
+            for (int i = 0; i < t.length; i++) {
+                row[i] /= sum[i];
+            }
+        }
+        for (int i = 0; i < t.length; i++) {
+            if (!Double.isFinite(sum[i])) {
+                for (int k = 0; k < position.length; k++) {
+                    cardinals[k][i] = t[i] == position[k] ? 1 : 0;
+                }
+            }
         }
     }
 
@@ -132,16 +202,27 @@ final class RowInterpolation {
 
     /** Adds the interpolated sums at the nodes to the sums of the block. */
     void spread(PointBlock block) {
-        for (int k = 0; k < nodes.count; k++) {
-            add(cardinals[k], nodes.sumX[k], block.sumX, block.count);
-            add(cardinals[k], nodes.sumY[k], block.sumY, block.count);
-            add(cardinals[k], nodes.sumZ[k], block.sumZ, block.count);
+        spread(Arrays.copyOf(nodes.sumX, nodes.count), block.sumX);
+        spread(Arrays.copyOf(nodes.sumY, nodes.count), block.sumY);
+        spread(Arrays.copyOf(nodes.sumZ, nodes.count), block.sumZ);
+    }
+
+    /** One sum a loop, so that the compiler uses vector instructions; see PointBlock.accumulate. */
+    private static void addPair(double[] first, double[] second, double a, double b, double[] sum, int count) {
+        for (int i = 0; i < count; i++) {
+            sum[i] += first[i] * a + second[i] * b;
         }
     }
 
-    private static void add(double[] cardinal, double value, double[] target, int count) {
-        for (int i = 0; i < count; i++) {
-            target[i] += cardinal[i] * value;
+    /** Adds values at the nodes, interpolated to the points, to {@code target}, [point]. */
+    void spread(double[] values, double[] target) {
+        int count = cardinals[0].length;
+        int k = 0;
+        for (; k + 1 < values.length; k += 2) {
+            addPair(cardinals[k], cardinals[k + 1], values[k], values[k + 1], target, count);
+        }
+        if (k < values.length) {
+            addPair(cardinals[k], cardinals[k], values[k], 0, target, count);
         }
     }
 

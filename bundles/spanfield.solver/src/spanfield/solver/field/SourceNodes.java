@@ -63,6 +63,18 @@ final class SourceNodes {
         }
     }
 
+    /** Adds copies of the nodes of another. */
+    void addAll(SourceNodes other) {
+        reserve(other.count);
+        System.arraycopy(other.x, 0, x, count, other.count);
+        System.arraycopy(other.y, 0, y, count, other.count);
+        System.arraycopy(other.z, 0, z, count, other.count);
+        System.arraycopy(other.dx, 0, dx, count, other.count);
+        System.arraycopy(other.dy, 0, dy, count, other.count);
+        System.arraycopy(other.dz, 0, dz, count, other.count);
+        count += other.count;
+    }
+
     private void reserve(int n) {
         if (count + n > x.length) {
             int size = Math.max(2 * x.length, count + n);

@@ -16,7 +16,11 @@ final class SpanVectors {
     final double ey;
     final double ez;
 
-    SpanVectors(CatenarySpan span) {
+    /** Place of the span in its wire. */
+    final int index;
+
+    SpanVectors(CatenarySpan span, int index) {
+        this.index = index;
         x0 = span.start().x();
         y0 = span.start().y();
         z0 = span.start().z();

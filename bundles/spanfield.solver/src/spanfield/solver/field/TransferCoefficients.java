@@ -249,10 +249,11 @@ public final class TransferCoefficients {
             }
         }
 
-        void setDifference(int source, int point, double[] values) {
+        /** Values from the point {@code first} on, [value][point]. */
+        void setDifferences(int source, int first, double[][] values) {
             for (int c = 0; c < 3; c++) {
-                differenceRe[source][c][point] = values[2 * c];
-                differenceIm[source][c][point] = values[2 * c + 1];
+                System.arraycopy(values[2 * c], 0, differenceRe[source][c], first, values[2 * c].length);
+                System.arraycopy(values[2 * c + 1], 0, differenceIm[source][c], first, values[2 * c + 1].length);
             }
         }
 

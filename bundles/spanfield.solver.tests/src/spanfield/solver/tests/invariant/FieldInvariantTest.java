@@ -235,6 +235,34 @@ class FieldInvariantTest {
         }
     }
 
+    /** The exact half-space on dense profiles and slanting rows (interpolated) equals that at single points (evaluated directly). */
+    @Test
+    void interpolatedHalfSpace_equalsDirectOne() {
+        List<Wire> wires = flat(0.2);
+        for (double resistivity : new double[] {1, 100, 1e4}) {
+            EarthReturn earth = new EarthReturn(EarthModel.EXACT_HALF_SPACE, resistivity, 60, 0);
+            for (double slope : new double[] {0, 0.4}) {
+                Position[] row = new Position[401];
+                for (int i = 0; i < row.length; i++) {
+                    row[i] = new Position(-100 + 0.5 * i, slope * (i - 200), 1 + 0.01 * slope * i);
+                }
+                TransferCoefficients many = Lines.transfer(wires, ObservationPoints.of(row), earth);
+                for (int i = 0; i < row.length; i += 25) {
+                    TransferCoefficients one = Lines.transfer(wires, ObservationPoints.of(row[i]), earth);
+                    for (int w = 0; w < wires.size(); w++) {
+                        double bound = many.numericalError(w, i) + one.numericalError(w, 0);
+                        double square = 0;
+                        for (int c = 0; c < 3; c++) {
+                            double difference = many.coefficient(w, c, i).subtract(one.coefficient(w, c, 0)).abs();
+                            square += difference * difference;
+                        }
+                        assertTrue(Math.sqrt(square) <= bound, row[i] + ": difference " + Math.sqrt(square) + ", bound " + bound);
+                    }
+                }
+            }
+        }
+    }
+
     /** Insulating earth adds nothing; perfectly conducting earth leaves no vertical field at its surface. */
     @Test
     void resistivityLimits_areMirrorAndNothing() {
