@@ -90,8 +90,8 @@ final class FilamentField {
         }
         block.accumulate(nodes);
         error += rounding(nodes.nearest);
-        boolean startFar = row != null && row.reaches(tailDistance(row, path.first()));
-        boolean finishFar = row != null && row.reaches(tailDistance(row, path.last()));
+        boolean startFar = row != null && row.reaches(tailDistance(row, true));
+        boolean finishFar = row != null && row.reaches(tailDistance(row, false));
         addTails(block, !startFar, !finishFar);
         return anyFar || startFar || finishFar ? error + addFar(block, row, nodes, tolerance, startFar, finishFar) : error;
     }
@@ -115,10 +115,10 @@ final class FilamentField {
         far.accumulate(nodes);
         addTails(far, startFar, finishFar);
         if (startFar) {
-            size += row.error(tailDistance(row, wire.path().first())) / tailDistance(row, wire.path().first());
+            size += row.error(tailDistance(row, true)) / tailDistance(row, true);
         }
         if (finishFar) {
-            size += row.error(tailDistance(row, wire.path().last())) / tailDistance(row, wire.path().last());
+            size += row.error(tailDistance(row, false)) / tailDistance(row, false);
         }
         row.spread(block);
         // interpolation passes errors at the nodes on, magnified by its Lebesgue constant, about 3 for these numbers of nodes
@@ -157,15 +157,16 @@ final class FilamentField {
         return least;
     }
 
-    /** Lower bound of the distance of the tail from an attachment to any point of a row; also of the attachment itself. */
-    private double tailDistance(RowInterpolation row, Position from) {
+    /** Lower bound of the distance of the tail before the first or after the last attachment to any point of a row. */
+    private double tailDistance(RowInterpolation row, boolean start) {
         PointBlock n = row.nodes;
         int last = n.count - 1;
+        Position from = start ? wire.path().first() : wire.path().last();
         double x = (n.x[0] + n.x[last]) / 2 - from.x();
         double y = (n.y[0] + n.y[last]) / 2 - from.y();
         double z = (n.z[0] + n.z[last]) / 2 - from.z();
-        SpanVectors v = from.equals(wire.path().first()) ? vectors[0] : vectors[vectors.length - 1];
-        double sign = from.equals(wire.path().first()) ? -1 : 1;
+        SpanVectors v = start ? vectors[0] : vectors[vectors.length - 1];
+        double sign = start ? -1 : 1;
         double along = Math.max(0, sign * (v.tx * x + v.ty * y));
         x -= sign * along * v.tx;
         y -= sign * along * v.ty;

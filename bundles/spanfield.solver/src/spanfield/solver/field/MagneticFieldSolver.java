@@ -35,6 +35,9 @@ public final class MagneticFieldSolver {
     /** Part of the asked accuracy that the quadrature of one wire may use up close to the line. */
     private static final double SHARE_NEARBY = 0.3;
 
+    /** Part of a wire's quadrature tolerance that interpolation along rows of points may use. */
+    private static final double SHARE_OF_ROWS = 0.3;
+
     /** Part of the asked accuracy that the images may use, relative to the image, which is far smaller than the field nearby. */
     private static final double SHARE_OF_EARTH = 0.3;
 
@@ -123,7 +126,7 @@ public final class MagneticFieldSolver {
         for (int w = 0; w < filaments.length; w++) {
             distances[w] = filaments[w].distanceBelow(block);
         }
-        RowInterpolation row = RowInterpolation.reaching(block, finest * 0.1, distances);
+        RowInterpolation row = RowInterpolation.reaching(block, finest * SHARE_OF_ROWS, distances);
         RowInterpolation.Choice rows = new RowInterpolation.Choice();
         double[] imageError = {0};
         double[][] images = earth == null ? null : earth.images(block, imageError);
