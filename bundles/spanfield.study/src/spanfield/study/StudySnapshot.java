@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.stream.Collectors;
@@ -25,6 +26,7 @@ import spanfield.study.internal.StudyData.StationData;
 import spanfield.study.internal.StudyIdentity;
 import spanfield.study.internal.StudyRunner;
 import spanfield.study.result.CaseInfo;
+import spanfield.study.result.LeastClearance;
 import spanfield.study.result.LimitInfo;
 import spanfield.study.result.Notice;
 import spanfield.study.result.StationInfo;
@@ -147,6 +149,38 @@ public final class StudySnapshot {
      */
     public List<Wire> wires(String caseId) {
         return prepared.wires(find(prepared.data().cases(), c -> c.info().id(), caseId, Messages.text("request.loadCase")));
+    }
+
+    /**
+     * Single wires of a line in a load case, swung by its wind: subconductors one by one.
+     *
+     * @param caseId identifier of the load case
+     * @param line   index of the line in the study, from 0
+     */
+    public List<Wire> wires(String caseId, int line) {
+        requireLine(line);
+        return prepared.wires(find(prepared.data().cases(), c -> c.info().id(), caseId, Messages.text("request.loadCase")), line);
+    }
+
+    /**
+     * Where the wires of a line come nearest to the ground, over all load cases; empty for a line without wires.
+     *
+     * @param line index of the line in the study, from 0
+     */
+    public Optional<LeastClearance> leastClearance(int line) {
+        requireLine(line);
+        return Optional.ofNullable(prepared.leastClearance(line));
+    }
+
+    /** Number of lines. */
+    public int lineCount() {
+        return prepared.data().lines().size();
+    }
+
+    private void requireLine(int line) {
+        if (line < 0 || line >= lineCount()) {
+            throw new IndexOutOfBoundsException("line " + line + " of a study with " + lineCount() + " lines");
+        }
     }
 
     /** The same study at another accuracy, dimensionless, {@link Accuracy#FINEST} to {@link Accuracy#COARSEST}. */

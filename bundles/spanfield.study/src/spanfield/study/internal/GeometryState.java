@@ -98,6 +98,17 @@ public final class GeometryState {
         return clearances[conductor][span];
     }
 
+    /** Single wires of a line by its index: every subconductor. */
+    List<Wire> wires(int line) {
+        List<Wire> own = new ArrayList<>();
+        for (int w = 0; w < conductorOfWire.length; w++) {
+            if (conductors.get(conductorOfWire[w]).line().index() == line) {
+                own.add(wires.get(w));
+            }
+        }
+        return List.copyOf(own);
+    }
+
     /** Least clearance of all conductors in metres. */
     double leastClearance() {
         return Arrays.stream(clearances).flatMap(Arrays::stream).mapToDouble(GroundClearance::metres).min().orElseThrow();

@@ -9,6 +9,7 @@ import spanfield.solver.earth.EarthReturn;
 import spanfield.solver.geometry.Wire;
 import spanfield.study.internal.StudyData.CaseData;
 import spanfield.study.internal.StudyData.StationData;
+import spanfield.study.result.LeastClearance;
 
 /** A sound study with its wires in space and the currents in them: everything a run needs, free of the model. Immutable. */
 public final class PreparedStudy {
@@ -57,6 +58,41 @@ public final class PreparedStudy {
     /** Single wires of a load case. */
     public List<Wire> wires(CaseData loadCase) {
         return state(loadCase).wires();
+    }
+
+    /** Single wires of a line in a load case. */
+    public List<Wire> wires(CaseData loadCase, int line) {
+        return state(loadCase).wires(line);
+    }
+
+    /** Least clearance of a line by its index, in the load case in which it is least; the first of equals. */
+    public LeastClearance leastClearance(int line) {
+        LeastClearance least = null;
+        for (CaseData loadCase : data.cases()) {
+            GeometryState state = state(loadCase);
+            for (int i = 0; i < state.conductors().size(); i++) {
+                least = state.conductors().get(i).line().index() == line ? lower(least, leastOf(state, i, loadCase)) : least;
+            }
+        }
+        return least;
+    }
+
+    private static LeastClearance leastOf(GeometryState state, int conductor, CaseData loadCase) {
+        StrungConductor strung = state.conductors().get(conductor);
+        LeastClearance least = null;
+        double along = 0;
+        for (int span = 0; span < strung.spanCount(); span++) {
+            GroundClearance c = state.clearance(conductor, span);
+            least = lower(least, new LeastClearance(loadCase.info().id(), loadCase.info().name(), strung.name(),
+                strung.line().structures().get(span).name(), strung.line().structures().get(span + 1).name(), c.metres(),
+                along + c.distance(), c.place().z() - strung.bundleDrop()));
+            along += state.centre(conductor).spans().get(span).horizontalLengthMetres();
+        }
+        return least;
+    }
+
+    private static LeastClearance lower(LeastClearance known, LeastClearance other) {
+        return known == null || other.clearanceMetres() < known.clearanceMetres() ? other : known;
     }
 
     ParallelGroups groups() {
