@@ -26,6 +26,7 @@ import spanfield.solver.geometry.Position;
 import spanfield.solver.geometry.Wire;
 import spanfield.study.CorridorPlan;
 import spanfield.study.StudySnapshot;
+import spanfield.study.result.LeastClearance;
 import spanfield.ui.common.AxisScale;
 import spanfield.ui.common.DisplayUnits;
 import spanfield.ui.common.StudyComputation;
@@ -46,6 +47,8 @@ public final class SpanPage extends StudyPage {
     }
 
     private List<Course> courses = List.of();
+    private List<String> structures = List.of();
+    private LeastClearance lowest;
 
     @Override
     public Control createControl(Composite parent) {
@@ -58,7 +61,8 @@ public final class SpanPage extends StudyPage {
         new Label(bar, SWT.NONE).setText("Line");
         lines = new Combo(bar, SWT.READ_ONLY);
         lines.addListener(SWT.Selection, event -> rebuild());
-        least = new Label(bar, SWT.NONE);
+        least = new Label(page, SWT.WRAP);
+        GridDataFactory.fillDefaults().grab(true, false).applyTo(least);
         canvas = new Canvas(page, SWT.DOUBLE_BUFFERED);
         canvas.setBackground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_BACKGROUND));
         canvas.setForeground(parent.getDisplay().getSystemColor(SWT.COLOR_LIST_FOREGROUND));
@@ -75,6 +79,7 @@ public final class SpanPage extends StudyPage {
         if (!java.util.Arrays.equals(names, lines.getItems())) {
             lines.setItems(names);
             lines.select(Math.min(before, names.length - 1));
+            rebuild();
         }
     }
 
@@ -86,44 +91,28 @@ public final class SpanPage extends StudyPage {
         }
     }
 
-    private Line chosen() {
-        int index = lines.getSelectionIndex();
-        return index >= 0 && index < document().study().getLines().size() ? document().study().getLines().get(index) : null;
-    }
-
     private void rebuild() {
         courses = new ArrayList<>();
-        double lowest = Double.POSITIVE_INFINITY;
-        double where = 0;
-        Line line = chosen();
-        if (snapshot != null && line != null && !snapshot.cases().isEmpty()) {
-            CorridorPlan plan = snapshot.plan();
-            CorridorPlan.PlanPoint start = plan.planPoint(line.getStructures().get(0).getStationMetres(), line.getStructures().get(0).getOffsetMetres());
-            for (Wire wire : snapshot.wires(snapshot.cases().get(0).id())) {
-                if (belongs(wire, line, start)) {
-                    Course course = course(wire, plan);
-                    courses.add(course);
-                    for (double[] p : course.points()) {
-                        if (p[1] - p[2] < lowest) {
-                            lowest = p[1] - p[2];
-                            where = p[0];
-                        }
-                    }
-                }
-            }
+        structures = List.of();
+        int line = lines.getSelectionIndex();
+        // The newest results may be older than the study: they count only where they still have the line.
+        boolean known = snapshot != null && line >= 0 && line < Math.min(snapshot.lineCount(), document().study().getLines().size());
+        lowest = known ? snapshot.leastClearance(line).orElse(null) : null;
+        if (lowest != null) {
+            snapshot.wires(lowest.caseId(), line).forEach(wire -> courses.add(course(wire, snapshot.plan())));
+            structures = document().study().getLines().get(line).getStructures().stream().map(s -> String.valueOf(s.getName())).toList();
         }
-        Units units = DisplayUnits.get();
-        least.setText(courses.isEmpty() ? "" : "   Least clearance " + Numbers.length(units.length().fromMetres(lowest)) + " " + units.length().code() + " at "
-            + Numbers.fixed(units.length().fromMetres(where), 0) + " " + units.length().code() + " along the line");
+        least.setText(lowest == null ? "" : leastText(lowest, snapshot.cases().size() > 1));
         least.requestLayout();
         canvas.redraw();
     }
 
-    /** A wire of the line begins near the axis of its first structure. */
-    private static boolean belongs(Wire wire, Line line, CorridorPlan.PlanPoint start) {
-        double reach = 1 + line.getStructures().get(0).getType().getAttachments().stream().mapToDouble(a -> Math.abs(a.getOffsetMetres())).max().orElse(0);
-        return wire.path().spans().size() == line.getStructures().size() - 1
-            && Math.hypot(wire.path().first().x() - start.x(), wire.path().first().y() - start.y()) <= reach;
+    private static String leastText(LeastClearance lowest, boolean several) {
+        Units units = DisplayUnits.get();
+        String unit = " " + units.length().code();
+        return "Least clearance " + Numbers.length(units.length().fromMetres(lowest.clearanceMetres())) + unit + ": " + lowest.wire() + ", "
+            + Numbers.fixed(units.length().fromMetres(lowest.alongMetres()), 0) + unit + " along the line, " + lowest.fromStructure() + " to "
+            + lowest.toStructure() + (several ? "; the least of all load cases, in '" + lowest.loadCase() + "'" : "");
     }
 
     private static Course course(Wire wire, CorridorPlan plan) {
@@ -176,7 +165,8 @@ public final class SpanPage extends StudyPage {
         for (Course course : courses) {
             gc.drawPolyline(frame.path(course.points(), 1));
         }
-        drawStructures(gc, frame, line);
+        drawStructures(gc, frame);
+        drawLeast(gc, frame, line);
     }
 
     /** Where lengths along the line and elevations fall in the plot; heights are exaggerated to fill it. */
@@ -219,19 +209,36 @@ public final class SpanPage extends StudyPage {
         gc.drawText(title, frame.plot().x + (frame.plot().width - gc.textExtent(title).x) / 2, frame.plot().y + frame.plot().height + line + 6, true);
     }
 
-    private void drawStructures(GC gc, Frame frame, int line) {
+    private void drawStructures(GC gc, Frame frame) {
         gc.setForeground(canvas.getForeground());
-        Line chosen = chosen();
         Course course = courses.get(0);
-        for (int i = 0; i < chosen.getStructures().size(); i++) {
-            Structure structure = chosen.getStructures().get(i);
+        for (int i = 0; i < structures.size(); i++) {
             int number = i;
             double[] at = course.points().get(sample(number, course));
             double top = courses.stream().mapToDouble(c -> c.points().get(sample(number, c))[1]).max().orElse(at[1]);
             gc.drawLine(frame.x(at[0]), frame.y(at[2]), frame.x(at[0]), frame.y(top));
-            String name = String.valueOf(structure.getName());
+            String name = structures.get(i);
             gc.drawText(name, Math.min(frame.x(at[0]) + 3, frame.plot().x + frame.plot().width - gc.textExtent(name).x), frame.plot().y + 2, true);
         }
+    }
+
+    /** A dimension from the lowest wire to the ground beneath it, with its length. */
+    private void drawLeast(GC gc, Frame frame, int line) {
+        Units units = DisplayUnits.get();
+        int x = frame.x(lowest.alongMetres());
+        int top = frame.y(lowest.elevationMetres());
+        int foot = frame.y(lowest.elevationMetres() - lowest.clearanceMetres());
+        int tick = line / 4;
+        gc.setForeground(canvas.getForeground());
+        gc.setLineStyle(SWT.LINE_DASH);
+        gc.drawLine(x, top, x, foot);
+        gc.setLineStyle(SWT.LINE_SOLID);
+        gc.drawLine(x - tick, top, x + tick, top);
+        gc.drawLine(x - tick, foot, x + tick, foot);
+        String text = Numbers.length(units.length().fromMetres(lowest.clearanceMetres())) + " " + units.length().code();
+        int width = gc.textExtent(text).x;
+        boolean fits = x + tick + width < frame.plot().x + frame.plot().width;
+        gc.drawText(text, fits ? x + tick : x - tick - width, (top + foot - line) / 2, true);
     }
 
     /** Sample of a course at a structure. */
@@ -247,6 +254,11 @@ public final class SpanPage extends StudyPage {
             rebuild();
         }
         return line != null;
+    }
+
+    /** The least clearance that is shown, or null. */
+    public LeastClearance least() {
+        return lowest;
     }
 
     @Override
