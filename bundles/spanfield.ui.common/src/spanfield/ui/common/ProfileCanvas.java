@@ -160,7 +160,8 @@ public final class ProfileCanvas extends Canvas {
 
     private void drawGrid(GC gc, Rectangle plot, int line) {
         Color faint = mix(0.85);
-        for (double tick : up.ticks(plot.height / (3 * line))) {
+        // At least two: a short chart with nothing but zero on its axis cannot be read.
+        for (double tick : up.ticks(Math.max(2, plot.height / (3 * line)))) {
             int y = up.toPixel(tick);
             gc.setForeground(faint);
             gc.drawLine(plot.x, y, plot.x + plot.width, y);

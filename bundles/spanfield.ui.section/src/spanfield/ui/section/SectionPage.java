@@ -1,6 +1,7 @@
 /* Copyright (c) 2026 The Spanfield developers. SPDX-License-Identifier: EPL-2.0 */
 package spanfield.ui.section;
 
+import java.util.List;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.jface.layout.GridDataFactory;
 import org.eclipse.jface.layout.GridLayoutFactory;
@@ -85,10 +86,16 @@ public final class SectionPage extends StudyPage {
             reading.requestLayout();
             return;
         }
+        List<List<String>> orders = view.orders(circuit);
+        if (orders.isEmpty()) {
+            reading.setText("The phases of '" + circuit.getName() + "' are placed one by one: choose a phase in the Outline and its attachment in Properties.");
+            reading.requestLayout();
+            return;
+        }
         Menu menu = new Menu(phaseOrder);
-        for (String order : view.orders(circuit)) {
+        for (List<String> order : orders) {
             MenuItem item = new MenuItem(menu, SWT.RADIO);
-            item.setText(circuit.getName() + ": " + order);
+            item.setText(circuit.getName() + ": " + SectionView.text(order));
             item.setSelection(order.equals(view.order(circuit)));
             item.addListener(SWT.Selection, event -> {
                 if (item.getSelection()) {

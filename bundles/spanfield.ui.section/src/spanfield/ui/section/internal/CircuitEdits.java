@@ -37,6 +37,8 @@ final class CircuitEdits {
     private static final SpanfieldPackage P = SpanfieldPackage.eINSTANCE;
     private static final SpanfieldFactory F = SpanfieldFactory.eINSTANCE;
     private static final double[] ANGLES = {0, -120, 120};
+    /** A circuit of four phases has 24 orders; six would have 720. */
+    private static final int MENU_PHASES = 4;
     private static final double CLEAR_METRES = 6;
     private static final double SPACING_METRES = 6;
     private static final double LEAST_HEIGHT_METRES = 14;
@@ -163,24 +165,30 @@ final class CircuitEdits {
         return command;
     }
 
-    /** The labels of a circuit's phases in the order of its attachments on the structure. */
-    static String order(Circuit circuit) {
-        StringBuilder text = new StringBuilder();
+    /** The labels of a circuit's phases in the order of its attachments on the structure; labels are of any length. */
+    static List<String> order(Circuit circuit) {
+        List<String> labels = new ArrayList<>();
         for (String attachment : positions(circuit)) {
             for (Phase phase : circuit.getPhases()) {
-                if (attachment.equals(phase.getAttachment())) {
-                    text.append(phase.getLabel());
+                if (attachment.equals(String.valueOf(phase.getAttachment()))) {
+                    labels.add(String.valueOf(phase.getLabel()));
                 }
             }
         }
-        return text.toString();
+        return labels;
+    }
+
+    /** An order as people write it: single letters side by side, longer labels with dashes between them. */
+    static String text(List<String> order) {
+        return String.join(order.stream().allMatch(label -> label.length() == 1) ? "" : "-", order);
     }
 
     /** The attachments that a circuit uses, in the order of the structure type. */
     private static List<String> positions(Circuit circuit) {
         List<String> used = new ArrayList<>();
         circuit.getPhases().forEach(phase -> used.add(String.valueOf(phase.getAttachment())));
-        StructureType type = ((Line) circuit.eContainer()).getStructures().get(0).getType();
+        List<Structure> structures = ((Line) circuit.eContainer()).getStructures();
+        StructureType type = structures.isEmpty() ? null : structures.get(0).getType();
         List<String> ordered = new ArrayList<>();
         if (type != null) {
             type.getAttachments().stream().map(Attachment::getName).filter(used::contains).forEach(ordered::add);
@@ -188,25 +196,34 @@ final class CircuitEdits {
         return ordered.size() == used.size() ? ordered : used;
     }
 
-    /** Every order of the labels of a circuit of up to three phases. */
-    static List<String> orders(Circuit circuit) {
-        List<String> all = new ArrayList<>();
-        permute("", order(circuit).chars().sorted().collect(StringBuilder::new, StringBuilder::appendCodePoint, StringBuilder::append).toString(), all);
+    /**
+     * Every order of the labels of a circuit, the alphabetic one first; none where two phases share an attachment or a label, or for more
+     * phases than a menu can hold.
+     */
+    static List<List<String>> orders(Circuit circuit) {
+        List<List<String>> all = new ArrayList<>();
+        List<String> labels = order(circuit).stream().sorted().toList();
+        boolean apart = Set.copyOf(labels).size() == circuit.getPhases().size() && Set.copyOf(positions(circuit)).size() == labels.size();
+        if (apart && labels.size() <= MENU_PHASES) {
+            permute(List.of(), labels, all);
+        }
         return all;
     }
 
-    private static void permute(String done, String left, List<String> all) {
+    private static void permute(List<String> done, List<String> left, List<List<String>> all) {
         if (left.isEmpty()) {
             all.add(done);
         }
-        for (int i = 0; i < left.length(); i++) {
-            permute(done + left.charAt(i), left.substring(0, i) + left.substring(i + 1), all);
+        for (String next : left) {
+            List<String> longer = new ArrayList<>(done);
+            longer.add(next);
+            permute(List.copyOf(longer), left.stream().filter(label -> !label.equals(next)).toList(), all);
         }
     }
 
     /** Puts the phases of a circuit on its attachments in another order. */
-    static Command reorder(EditingDomain domain, Circuit circuit, String order) {
-        CompoundCommand command = new CompoundCommand("Phase order " + order + " of " + circuit.getName());
+    static Command reorder(EditingDomain domain, Circuit circuit, List<String> order) {
+        CompoundCommand command = new CompoundCommand("Phase order " + text(order) + " of " + circuit.getName());
         List<String> positions = positions(circuit);
         for (Phase phase : circuit.getPhases()) {
             String attachment = positions.get(order.indexOf(phase.getLabel()));

@@ -10,7 +10,9 @@ import org.eclipse.draw2d.geometry.Rectangle;
 import org.eclipse.gef.DragTracker;
 import org.eclipse.gef.EditPolicy;
 import org.eclipse.gef.Request;
+import org.eclipse.gef.RequestConstants;
 import org.eclipse.gef.editparts.AbstractGraphicalEditPart;
+import org.eclipse.gef.tools.DragEditPartsTracker;
 import org.eclipse.swt.SWT;
 
 /** The part of one item: chooses a figure for its kind and places it by the scale of the section. */
@@ -62,7 +64,7 @@ final class ItemPart extends AbstractGraphicalEditPart {
             case GROUND, REFERENCE, STRUCTURE -> ((PolylinesFigure) getFigure()).setLines(lines(item, scale));
             case LEFT_EDGE -> getFigure().setBounds(new Rectangle(first.x - EdgeFigure.WIDTH + 7, first.y - EdgeFigure.HEIGHT, EdgeFigure.WIDTH, EdgeFigure.HEIGHT));
             case RIGHT_EDGE -> getFigure().setBounds(new Rectangle(first.x - 6, first.y - EdgeFigure.HEIGHT, EdgeFigure.WIDTH, EdgeFigure.HEIGHT));
-            case PHASE, SHIELD -> getFigure().setBounds(WireFigure.boundsAt(first));
+            case PHASE, SHIELD -> ((WireFigure) getFigure()).setPlace(first);
         }
     }
 
@@ -91,6 +93,28 @@ final class ItemPart extends AbstractGraphicalEditPart {
 
     @Override
     public DragTracker getDragTracker(Request request) {
-        return new org.eclipse.gef.tools.DragEditPartsTracker(this);
+        return new FreeTracker(this);
+    }
+
+    @Override
+    public void performRequest(Request request) {
+        if (RequestConstants.REQ_OPEN.equals(request.getType())) {
+            context.open(item());
+        }
+    }
+
+    /** Tells the request whether the key is held that leaves moves unrounded. */
+    private static final class FreeTracker extends DragEditPartsTracker {
+
+        FreeTracker(ItemPart part) {
+            super(part);
+        }
+
+        @Override
+        @SuppressWarnings("unchecked")
+        protected void updateTargetRequest() {
+            super.updateTargetRequest();
+            getTargetRequest().getExtendedData().put(MovePolicy.FREE, getCurrentInput().isAltKeyDown());
+        }
     }
 }

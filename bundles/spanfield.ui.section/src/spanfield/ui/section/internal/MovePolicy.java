@@ -15,9 +15,17 @@ final class MovePolicy extends NonResizableEditPolicy {
         this.part = part;
     }
 
+    /** Key in the data of a request: whether the move is not to be rounded. */
+    static final String FREE = "spanfield.free";
+
+    private static boolean free(ChangeBoundsRequest request) {
+        return Boolean.TRUE.equals(request.getExtendedData().get(FREE));
+    }
+
     @Override
     protected Command getMoveCommand(ChangeBoundsRequest request) {
         Point delta = request.getMoveDelta();
+        boolean free = free(request);
         SectionContext context = part.context();
         SectionItem item = part.item();
         return new Command(SectionMoves.label(item)) {
@@ -28,7 +36,7 @@ final class MovePolicy extends NonResizableEditPolicy {
 
             @Override
             public void execute() {
-                context.move(item, delta);
+                context.move(item, delta, free);
             }
         };
     }
@@ -36,7 +44,7 @@ final class MovePolicy extends NonResizableEditPolicy {
     @Override
     protected void showChangeBoundsFeedback(ChangeBoundsRequest request) {
         super.showChangeBoundsFeedback(request);
-        part.context().preview(part.item(), request.getMoveDelta());
+        part.context().preview(part.item(), request.getMoveDelta(), free(request));
     }
 
     @Override

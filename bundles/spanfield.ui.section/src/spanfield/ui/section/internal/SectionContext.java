@@ -23,14 +23,17 @@ interface SectionContext {
     /** Colour of a circuit by its number. */
     Color circuitColor(int group);
 
-    /** Moves an item by pixels, as a command. */
-    void move(SectionItem item, Point delta);
+    /** Moves an item by pixels, as a command; a free move is not rounded. */
+    void move(SectionItem item, Point delta, boolean free);
 
     /** Places something new, as a command. */
     void place(SectionPalette.Kind kind, Point place);
 
     /** Computes what a move would give, without changing the study. */
-    void preview(SectionItem item, Point delta);
+    void preview(SectionItem item, Point delta, boolean free);
+
+    /** Shows the numbers of an item where they are typed. */
+    void open(SectionItem item);
 
     /** The drag is over, or was given up. */
     void endPreview();

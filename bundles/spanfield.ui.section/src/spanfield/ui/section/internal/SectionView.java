@@ -3,6 +3,7 @@ package spanfield.ui.section.internal;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Consumer;
 import org.eclipse.draw2d.FigureCanvas;
 import org.eclipse.draw2d.geometry.Point;
@@ -24,6 +25,7 @@ import org.eclipse.swt.graphics.RGB;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
+import spanfield.model.Attachment;
 import spanfield.model.Circuit;
 import spanfield.model.Line;
 import spanfield.model.Phase;
@@ -32,8 +34,6 @@ import spanfield.model.ShieldWire;
 import spanfield.model.StrungElement;
 import spanfield.model.Structure;
 import spanfield.model.Study;
-import spanfield.report.Numbers;
-import spanfield.report.Units;
 import spanfield.study.CorridorPlan;
 import spanfield.study.result.LateralProfile;
 import spanfield.ui.common.DisplayUnits;
@@ -43,10 +43,13 @@ import spanfield.ui.common.StudyEditor;
 /** The graphical viewer of the cross-section and what its gestures do. */
 public final class SectionView implements SectionContext {
 
-    /** How to use the page, in one line. */
-    public static final String HINT = "Drag wires, structures and edges; arrow keys move what is chosen by 0.1 m. Properties takes exact values.";
+    /** How to use the page. */
+    public static final String HINT = "Drag wires, structures and edges (Alt: not rounded). Page Down chooses, arrow keys move, Enter shows exact numbers.";
 
     private static final double SNAP_METRES = 0.1;
+    private static final double ZOOM_STEP = 1.25;
+    private static final double LEAST_PIXELS_PER_METRE = 0.2;
+    private static final double GREATEST_PIXELS_PER_METRE = 200;
     private static final int PALETTE_WIDTH = 110;
     private static final double MARGIN_METRES = 8;
     private static final float[] HUES = {215, 25, 150, 290, 45, 185};
@@ -61,6 +64,7 @@ public final class SectionView implements SectionContext {
     private LateralProfile profile;
     private boolean snap = true;
     private boolean dragging;
+    private boolean revealing;
     private boolean fitted;
 
     /**
@@ -89,6 +93,7 @@ public final class SectionView implements SectionContext {
         viewer.addSelectionChangedListener(event -> selectionChanged());
         control.addListener(SWT.MouseMove, this::pointerMoved);
         control.addListener(SWT.KeyDown, this::keyPressed);
+        control.addListener(SWT.MouseWheel, this::wheelTurned);
         control.addListener(SWT.Resize, event -> {
             if (!fitted && station != null && control.getSize().x > 100) {
                 fitted = true;
@@ -202,10 +207,29 @@ public final class SectionView implements SectionContext {
         }
     }
 
-    /** Changes the scale by a factor. */
+    /** Changes the scale by a factor; what is in the middle stays there. */
     public void zoom(double factor) {
-        scale = scale.zoomed(factor);
+        zoom(factor, control.getSize().x / 2, control.getSize().y / 2);
+    }
+
+    /** Changes the scale by a factor; what lies at a pixel of the control stays there, as far as the sheet reaches. */
+    private void zoom(double factor, int x, int y) {
+        Point before = inSheet(x, y);
+        double offset = scale.offset(before.x);
+        double elevation = scale.elevation(before.y);
+        double wanted = Math.max(LEAST_PIXELS_PER_METRE, Math.min(GREATEST_PIXELS_PER_METRE, scale.pixelsPerMetre() * factor));
+        scale = scale.zoomed(wanted / scale.pixelsPerMetre());
         refresh();
+        viewer.flush();
+        Point after = scale.toPixel(offset, elevation);
+        ((FigureCanvas) control).scrollTo(after.x - x, after.y - y);
+    }
+
+    private void wheelTurned(Event event) {
+        if ((event.stateMask & SWT.MOD1) != 0 && event.count != 0) {
+            zoom(event.count > 0 ? ZOOM_STEP : 1 / ZOOM_STEP, event.x, event.y);
+            event.doit = false;
+        }
     }
 
     /** Whether moves are rounded to 0.1 m. */
@@ -225,43 +249,67 @@ public final class SectionView implements SectionContext {
             return;
         }
         Point place = inSheet(event.x, event.y);
-        double offset = scale.offset(place.x);
         CorridorPlan plan = CorridorPlan.of(editor.document().study().getCorridor());
-        double height = scale.elevation(place.y) - plan.groundElevation(station.getStationMetres(), offset);
-        Units units = DisplayUnits.get();
-        String text = "Offset " + Numbers.fixed(units.length().fromMetres(offset), 1) + " " + units.length().code() + ", "
-            + Numbers.fixed(units.length().fromMetres(height), 1) + " " + units.length().code() + " above ground";
-        reading.accept(text + fieldText(offset, units));
-    }
-
-    private String fieldText(double offset, Units units) {
-        if (profile == null || profile.cases().isEmpty()) {
-            return "";
-        }
-        double[] offsets = profile.offsetsMetres();
-        int i = java.util.Arrays.binarySearch(offsets, offset);
-        int nearest = Math.max(0, Math.min(offsets.length - 1, i >= 0 ? i : -i - 1));
-        if (offset < offsets[0] || offset > offsets[offsets.length - 1]) {
-            return "";
-        }
-        var first = profile.cases().get(0);
-        return ".   Field there at " + Numbers.stated(units.length().fromMetres(profile.referenceHeightMetres())) + " " + units.length().code() + ": "
-            + Numbers.field(units.field().fromTesla(first.series().value(nearest).resultantTesla())) + " " + units.field().symbol() + " ("
-            + first.loadCase().name() + ")";
+        reading.accept(SectionReading.at(plan, profile, station.getStationMetres(), scale.offset(place.x), scale.elevation(place.y), DisplayUnits.get()));
     }
 
     private void keyPressed(Event event) {
         double step = (event.stateMask & SWT.SHIFT) == 0 ? SNAP_METRES : 10 * SNAP_METRES;
-        SectionItem chosen = chosen();
-        if (event.keyCode == SWT.DEL) {
-            removeSelected();
-        } else if (chosen != null && chosen.draggable()) {
-            double across = event.keyCode == SWT.ARROW_LEFT ? -step : event.keyCode == SWT.ARROW_RIGHT ? step : 0;
-            double up = event.keyCode == SWT.ARROW_DOWN ? -step : event.keyCode == SWT.ARROW_UP ? step : 0;
-            if (across != 0 || up != 0) {
-                execute(chosen, across, up);
-            }
+        switch (event.keyCode) {
+            case SWT.DEL -> removeSelected();
+            case SWT.PAGE_DOWN -> chooseNext(1);
+            case SWT.PAGE_UP -> chooseNext(-1);
+            case SWT.CR, SWT.KEYPAD_CR -> open(chosen());
+            case SWT.ARROW_LEFT -> nudge(-step, 0);
+            case SWT.ARROW_RIGHT -> nudge(step, 0);
+            case SWT.ARROW_DOWN -> nudge(0, -step);
+            case SWT.ARROW_UP -> nudge(0, step);
+            default -> zoomByKey(event.character);
         }
+    }
+
+    private void zoomByKey(char key) {
+        if (key == '+' || key == '-') {
+            zoom(key == '+' ? ZOOM_STEP : 1 / ZOOM_STEP);
+        } else if (key == '0') {
+            fit();
+        }
+    }
+
+    private void nudge(double across, double up) {
+        SectionItem chosen = chosen();
+        if (chosen != null && chosen.draggable()) {
+            execute(chosen, across, up, snap);
+        }
+    }
+
+    /** Chooses the item after or before the chosen one, round about. */
+    private void chooseNext(int by) {
+        List<SectionItem> choosable = items.stream().filter(SectionItem::draggable).toList();
+        if (!choosable.isEmpty()) {
+            int at = choosable.indexOf(chosen());
+            SectionItem next = choosable.get(at < 0 ? by > 0 ? 0 : choosable.size() - 1 : Math.floorMod(at + by, choosable.size()));
+            viewer.select((EditPart) viewer.getEditPartRegistry().get(next));
+            viewer.reveal((EditPart) viewer.getEditPartRegistry().get(next));
+            reading.accept(SectionMoves.name(next) + " is chosen. Arrow keys move it, Enter shows its numbers in Properties.");
+        }
+    }
+
+    @Override
+    public void open(SectionItem item) {
+        Attachment attachment = item == null ? null : attachment(item);
+        if (attachment != null) {
+            editor.select(attachment);
+            reading.accept("Properties shows the attachment '" + attachment.getName() + "': type its offset and height there.");
+        }
+    }
+
+    /** Where a wire is attached on the structure that is drawn; null for anything else. */
+    private Attachment attachment(SectionItem item) {
+        String name = item.target() instanceof Phase phase ? phase.getAttachment() : item.target() instanceof ShieldWire wire ? wire.getAttachment() : null;
+        Line line = SectionMoves.line(item.target());
+        return name == null || line == null ? null : nearest(line).map(Structure::getType).stream().flatMap(type -> type.getAttachments().stream())
+            .filter(a -> name.equals(a.getName())).findFirst().orElse(null);
     }
 
     private SectionItem chosen() {
@@ -271,17 +319,26 @@ public final class SectionView implements SectionContext {
 
     private void selectionChanged() {
         SectionItem chosen = chosen();
-        if (chosen != null && chosen.target() != null) {
+        if (chosen != null && chosen.target() != null && !revealing) {
             editor.select(chosen.target());
         }
     }
 
-    /** Chooses the item of a model object; a circuit is shown by its first phase. */
+    /**
+     * Chooses the item of a model object: a circuit is shown by its first phase, an attachment by a wire on it. The editor's selection stays
+     * with the object.
+     */
     public boolean select(EObject object) {
         for (Object child : viewer.getContents().getChildren()) {
             SectionItem item = ((ItemPart) child).item();
-            if (item.target() == object || object instanceof Circuit && item.target() instanceof Phase && item.target().eContainer() == object) {
-                viewer.select((EditPart) child);
+            if (item.target() == object || object instanceof Circuit && item.target() instanceof Phase && item.target().eContainer() == object
+                || object instanceof Attachment && attachment(item) == object) {
+                revealing = true;
+                try {
+                    viewer.select((EditPart) child);
+                } finally {
+                    revealing = false;
+                }
                 return true;
             }
         }
@@ -291,25 +348,29 @@ public final class SectionView implements SectionContext {
     // moves
 
     @Override
-    public void move(SectionItem item, Point delta) {
-        execute(item, scale.metres(delta.x), -scale.metres(delta.y));
+    public void move(SectionItem item, Point delta, boolean free) {
+        execute(item, scale.metres(delta.x), -scale.metres(delta.y), snap && !free);
     }
 
-    private void execute(SectionItem item, double across, double up) {
+    private List<SectionMoves.Change> changes(SectionItem item, double across, double up, boolean snapped) {
+        return SectionMoves.changes(item, station.getStationMetres(), across, up, snapped ? SNAP_METRES : 0);
+    }
+
+    private void execute(SectionItem item, double across, double up, boolean snapped) {
         CompoundCommand command = new CompoundCommand(SectionMoves.label(item));
-        for (SectionMoves.Change change : SectionMoves.changes(item, across, up, snap ? SNAP_METRES : 0)) {
+        for (SectionMoves.Change change : changes(item, across, up, snapped)) {
             command.append(SetCommand.create(editor.document().domain(), change.object(), change.attribute(), change.value()));
         }
         editor.document().execute(command);
     }
 
     @Override
-    public void preview(SectionItem item, Point delta) {
+    public void preview(SectionItem item, Point delta, boolean free) {
         dragging = true;
         EcoreUtil.Copier copier = new EcoreUtil.Copier();
         Study copy = (Study) copier.copy(editor.document().study());
         copier.copyReferences();
-        for (SectionMoves.Change change : SectionMoves.changes(item, scale.metres(delta.x), -scale.metres(delta.y), snap ? SNAP_METRES : 0)) {
+        for (SectionMoves.Change change : changes(item, scale.metres(delta.x), -scale.metres(delta.y), snap && !free)) {
             copier.get(change.object()).eSet(change.attribute(), change.value());
         }
         editor.computation().preview(copy);
@@ -364,25 +425,24 @@ public final class SectionView implements SectionContext {
         CorridorPlan plan = CorridorPlan.of(study.getCorridor());
         double offset = scale.offset(pixel.x);
         double height = scale.elevation(pixel.y) - plan.groundElevation(station.getStationMetres(), offset) + sagHere(line, plan);
-        double fromAxis = offset - nearest(line).getOffsetMetres();
+        double fromAxis = offset - nearest(line).map(Structure::getOffsetMetres).orElse(0.0);
         editor.document().execute(kind == SectionPalette.Kind.CIRCUIT
             ? CircuitEdits.add(editor.document().domain(), study, line, fromAxis, height)
             : CircuitEdits.addShield(editor.document().domain(), study, line, fromAxis, height));
     }
 
-    private Structure nearest(Line line) {
+    private Optional<Structure> nearest(Line line) {
         return line.getStructures().stream().min(java.util.Comparator.comparingDouble(
-            s -> Math.abs(s.getStationMetres() - station.getStationMetres()))).orElseThrow();
+            s -> Math.abs(s.getStationMetres() - station.getStationMetres())));
     }
 
     /** How much lower a wire of the line hangs here than at its structures, so that what is placed appears at the pointer. */
     private double sagHere(Line line, CorridorPlan plan) {
         for (SectionItem item : items) {
             if (item.kind() == SectionItem.Kind.PHASE && item.target().eContainer().eContainer() == line) {
-                String name = ((Phase) item.target()).getAttachment();
+                Attachment hung = attachment(item);
                 double here = item.places().get(0)[1] - plan.groundElevation(station.getStationMetres(), item.places().get(0)[0]);
-                return nearest(line).getType().getAttachments().stream().filter(a -> name.equals(a.getName())).findFirst()
-                    .map(a -> a.getHeightMetres() - a.getInsulatorLengthMetres() - here).orElse(0.0);
+                return hung == null ? 0 : hung.getHeightMetres() - hung.getInsulatorLengthMetres() - here;
             }
         }
         return 0;
@@ -400,17 +460,22 @@ public final class SectionView implements SectionContext {
     }
 
     /** Order of a circuit's phases on its attachments. */
-    public String order(Circuit circuit) {
+    public List<String> order(Circuit circuit) {
         return CircuitEdits.order(circuit);
     }
 
     /** Every order of a circuit's phases. */
-    public List<String> orders(Circuit circuit) {
+    public List<List<String>> orders(Circuit circuit) {
         return CircuitEdits.orders(circuit);
     }
 
+    /** An order of phases as people write it. */
+    public static String text(List<String> order) {
+        return CircuitEdits.text(order);
+    }
+
     /** Changes the order of a circuit's phases. */
-    public void reorder(Circuit circuit, String order) {
+    public void reorder(Circuit circuit, List<String> order) {
         editor.document().execute(CircuitEdits.reorder(editor.document().domain(), circuit, order));
     }
 

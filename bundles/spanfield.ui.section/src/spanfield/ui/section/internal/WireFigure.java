@@ -2,6 +2,7 @@
 package spanfield.ui.section.internal;
 
 import org.eclipse.draw2d.Figure;
+import org.eclipse.draw2d.FigureUtilities;
 import org.eclipse.draw2d.Graphics;
 import org.eclipse.draw2d.geometry.Point;
 import org.eclipse.draw2d.geometry.Rectangle;
@@ -11,7 +12,7 @@ import org.eclipse.swt.graphics.Color;
 final class WireFigure extends Figure {
 
     private static final int RADIUS = 6;
-    private static final int WIDTH = 34;
+    private static final int GAP = 4;
 
     private final String label;
     private final boolean shield;
@@ -24,16 +25,18 @@ final class WireFigure extends Figure {
         setOpaque(false);
     }
 
-    /** Bounds of the figure about the place of the wire. */
-    static Rectangle boundsAt(Point place) {
-        return new Rectangle(place.x - RADIUS - 2, place.y - RADIUS - 3, WIDTH, 2 * RADIUS + 6);
+    /** Puts the figure about the place of the wire, with room for its label. The figure has a parent by then, for its font. */
+    void setPlace(Point place) {
+        int half = label.isEmpty() ? RADIUS + 3 : Math.max(RADIUS + 3, FigureUtilities.getFontMetrics(getFont()).getHeight() / 2 + 1);
+        int text = label.isEmpty() ? 0 : GAP + FigureUtilities.getTextWidth(label, getFont());
+        setBounds(new Rectangle(place.x - RADIUS - 2, place.y - half, 2 * RADIUS + 4 + text, 2 * half));
     }
 
     @Override
     protected void paintFigure(Graphics g) {
         Rectangle r = getBounds();
         int x = r.x + RADIUS + 2;
-        int y = r.y + RADIUS + 3;
+        int y = r.y + r.height / 2;
         g.setForegroundColor(color);
         g.setBackgroundColor(color);
         if (shield) {
@@ -42,7 +45,7 @@ final class WireFigure extends Figure {
         } else {
             g.fillOval(x - RADIUS, y - RADIUS, 2 * RADIUS, 2 * RADIUS);
             g.setForegroundColor(getParent().getForegroundColor());
-            g.drawString(label, x + RADIUS + 4, r.y + r.height / 2 - g.getFontMetrics().getHeight() / 2);
+            g.drawString(label, x + RADIUS + GAP, r.y + r.height / 2 - g.getFontMetrics().getHeight() / 2);
         }
     }
 }
